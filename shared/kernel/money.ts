@@ -39,7 +39,8 @@ export function allocate(amountCents: Cents, weights: readonly number[]): Cents[
   requireWhole(amountCents, 'amountCents');
   for (const weight of weights) requireWhole(weight, 'weight');
   const sum = weights.reduce((total, weight) => total + BigInt(weight), 0n);
-  if (amountCents < 0 || weights.some((weight) => weight < 0)) throw new RangeError('nothing may be negative');
+  if (amountCents < 0 || weights.some((weight) => weight < 0))
+    throw new RangeError('nothing may be negative');
   if (sum === 0n) throw new RangeError('at least one weight must be above 0');
   const exact = weights.map((weight, index) => {
     const product = BigInt(amountCents) * BigInt(weight);
