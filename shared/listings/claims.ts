@@ -9,7 +9,8 @@ const UNIT = '(?:unit|transmission|gearbox|trans|transfer case|t-case|axle|core|
 
 /** Each claims that the whole unit was worked over or never used; a new part in it claims nothing. */
 const CLAIMS: readonly RegExp[] = [
-  /\bre-?buil[dt]s?\b/giu,
+  /\bre-?built\b/giu,
+  /\b(?:fresh|recent|full|complete|professional|stage \d)(?:ly)? re-?build\b/giu,
   /\bre-?man(?:ufactured|d|s)?\b/giu,
   /\bre-?condition(?:ed)?\b/giu,
   /\bover-?hauled\b/giu,
@@ -22,7 +23,7 @@ const CLAIMS: readonly RegExp[] = [
 
 /** Said of what is to come, or denied, it's no claim: "needs to be rebuilt", "not rebuilt", "ready to rebuild". */
 const DENIED =
-  /(?:\bnot|\bnever|\bun|\bneeds?|\bneeds? to be|\bto be|\bto|\bcan be|\bmust be|\bfor|\bcould be|\bshould be|\bbefore(?: you)?|\bno|\bisn['’]t|\bwasn['’]t|\byour(?: own)?|\ba)[\s-]*$/iu;
+  /(?:\bnot|\bnever|\bnot a|\bneeds?|\b(?:needs?|has|have|wants?|ought) to be|\b(?:can|must|could|should|will) be|\bneeds? a|\bfor a|\bto|\bno|\bisn['’]t|\bwasn['’]t)[\s-]*$/iu;
 const OTHER_MEANING = /^[\s-]*(?:kit|kits|able|manual|it|them|this)\b/iu;
 
 /**

@@ -1,0 +1,55 @@
+// Starts a draft for a seller: the unit may already be known from its code, everything else may come later.
+import { randomInt } from 'node:crypto';
+import { hasDuty, type Actor } from '../../shared/accounts/actor';
+import { newId } from '../../shared/kernel/ids';
+import type { DraftBody } from '../../shared/listings/contract';
+import { transaction } from '../db/transaction';
+import type { Deps } from '../deps';
+import { notFound, refuse, type Refusal } from '../http/refusal';
+import { changeErrors, columnsOf, derivedOf } from './facts';
+import { insertListing, loadStock, findSeller, updateListing, type Stock } from './queries';
+import { settleUnit } from './unit';
+
+/** No 0, 1, I, L, O or U: it's read off a tag and keyed in by hand. */
+const TAG_LETTERS = '23456789ABCDEFGHJKMNPQRSTVWXYZ';
+
+/** Seven random characters and one that checks them, in two groups: "K7QH-29FD". */
+export function newTagCode(): string {
+  const digits = Array.from({ length: 7 }, () => randomInt(TAG_LETTERS.length));
+  const check = digits.reduce((sum, digit, index) => sum + digit * (index + 2), 0) % TAG_LETTERS.length;
+  const text = [...digits, check].map((digit) => TAG_LETTERS.charAt(digit)).join('');
+  return `${text.slice(0, 4)}-${text.slice(4)}`;
+}
+
+export async function createDraft(deps: Deps, actor: Actor, body: DraftBody): Promise<Stock | Refusal> {
+  const { sellerId, ...fields } = body;
+  if (!actor.memberships.some((membership) => membership.sellerId === sellerId))
+    return notFound('seller account');
+  if (!hasDuty(actor, sellerId, 'lister'))
+    return refuse('forbidden', 'Only somebody with the lister duty lists units.');
+  const errors = changeErrors(fields);
+  if (errors.length > 0) return refuse('invalid', errors[0]?.message ?? '', { errors });
+  const now = deps.clock.now();
+  return transaction(deps.db, async (tx) => {
+    const seller = await findSeller(tx, sellerId);
+    if (!seller) return notFound('seller account');
+    const unit = await settleUnit(tx, sellerId, fields, null);
+    if ('refusal' in unit) return unit;
+    const draft = await insertListing(tx, {
+      id: newId('lst', now.getTime()),
+      sellerId,
+      tagCode: newTagCode(),
+      state: 'pulled',
+      zip: seller.zip,
+      lat: seller.lat,
+      lon: seller.lon,
+      createdAt: now,
+      updatedAt: now,
+      ...columnsOf(fields),
+      ...unit.columns,
+    });
+    await updateListing(tx, draft, derivedOf(draft), now);
+    const stock = await loadStock(tx, draft.id);
+    return stock ?? notFound('listing');
+  });
+}
