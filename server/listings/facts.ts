@@ -50,13 +50,7 @@ export const missingOf = (
   stock: Pick<Stock, 'row' | 'seller'>,
   shots: readonly string[],
   mailChecked: boolean,
-): FieldError[] =>
-  missingForPublish(
-    draftFacts(stock.row),
-    shots,
-    { kind: stock.seller.kind, placed: stock.seller.lat !== null && stock.seller.lon !== null },
-    mailChecked,
-  );
+): FieldError[] => missingForPublish(draftFacts(stock.row), shots, { kind: stock.seller.kind }, mailChecked);
 
 /** The faults of a change that no later step could mend. */
 export function changeErrors(body: ChangeBody): FieldError[] {

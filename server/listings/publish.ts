@@ -48,7 +48,15 @@ export async function publishDraft(
       },
       now,
     );
-    await recordAudit(tx, { actorUserId: actor.userId, action: 'listing_published', objectId: id, now });
+    await recordAudit(tx, {
+      at: now,
+      actorUserId: actor.userId,
+      actorKind: 'lister',
+      action: 'listing_published',
+      objectKind: 'listing',
+      objectId: id,
+      detail: {},
+    });
     return (await loadStock(tx, id)) ?? notFound('listing');
   });
 }

@@ -1,21 +1,23 @@
-// The place a page of results ends at, as an opaque text that is checked before any of it reaches a statement.
+// The place a page of results ends at: how the words were meant, the order, and the last row's values in that order.
 import { z } from 'zod';
+import { packCursor, unpackCursor } from '../../shared/kernel/cursor';
 
-const MODES = ['none', 'code', 'words', 'near'] as const;
-export type Mode = (typeof MODES)[number];
+const mode = z.enum(['none', 'code', 'words', 'near']);
+export type Mode = z.infer<typeof mode>;
 
 /** The columns a page is ordered by; each form has one fixed list of keys, compared as a row. */
 export type Order = 'total' | 'newest' | 'code' | 'distance';
 
 const whole = z.number().int().min(0).max(Number.MAX_SAFE_INTEGER);
 const rowId = z.string().min(3).max(64);
+const miles = z.number().min(0).max(30_000);
 
-const KEYS = {
-  total: z.tuple([whole, rowId]),
-  newest: z.tuple([z.iso.datetime(), rowId]),
-  code: z.tuple([z.string().max(60), whole, rowId]),
-  distance: z.tuple([z.number().min(0).max(30_000), rowId, whole, rowId]),
-} as const;
+const place = z.union([
+  z.tuple([mode, z.literal('total'), whole, rowId]),
+  z.tuple([mode, z.literal('newest'), z.iso.datetime(), rowId]),
+  z.tuple([mode, z.literal('code'), z.string().max(60), whole, rowId]),
+  z.tuple([mode, z.literal('distance'), miles, rowId, whole, rowId]),
+]);
 
 export interface Place {
   readonly mode: Mode;
@@ -23,22 +25,13 @@ export interface Place {
   readonly keys: readonly (string | number)[];
 }
 
-const envelope = z.strictObject({
-  m: z.enum(MODES),
-  o: z.enum(['total', 'newest', 'code', 'distance']),
-  k: z.array(z.union([z.string(), z.number()])).max(4),
-});
-
-export const writeCursor = (place: Place): string =>
-  Buffer.from(JSON.stringify({ m: place.mode, o: place.order, k: place.keys })).toString('base64url');
+export const writeCursor = ({ mode: meant, order, keys }: Place): string =>
+  packCursor([meant, order, ...keys]);
 
 /** Null for a text that no page of ours ended with. */
 export function readCursor(text: string): Place | null {
-  try {
-    const parsed = envelope.parse(JSON.parse(Buffer.from(text, 'base64url').toString('utf8')));
-    const keys = KEYS[parsed.o].parse(parsed.k);
-    return { mode: parsed.m, order: parsed.o, keys };
-  } catch {
-    return null;
-  }
+  const values = unpackCursor(text, place);
+  if (!values) return null;
+  const [meant, order, ...keys] = values;
+  return { mode: meant, order, keys };
 }

@@ -126,7 +126,7 @@ export function sellersNear(ask: Ask, values: Values): string | null {
   const { from, query } = ask;
   if (!from) return null;
   const miles = milesTo(values.take(from.lat), values.take(from.lon));
-  const clauses = ['s.lat is not null', 's.lon is not null'];
+  const clauses = ['true'];
   if (query.withinMiles !== undefined) clauses.push(box(from, query.withinMiles, values));
   const chosen = oneOf('s.id', query.sellerId, values);
   if (chosen) clauses.push(chosen);

@@ -21,7 +21,15 @@ export async function withdraw(
     if (row.status !== 'live' && row.status !== 'draft')
       return notWhile(row, 'There is nothing to withdraw.');
     await updateListing(tx, row, { status: 'withdrawn' }, now);
-    await recordAudit(tx, { actorUserId: actor.userId, action: 'listing_withdrawn', objectId: id, now });
+    await recordAudit(tx, {
+      at: now,
+      actorUserId: actor.userId,
+      actorKind: 'lister',
+      action: 'listing_withdrawn',
+      objectKind: 'listing',
+      objectId: id,
+      detail: {},
+    });
     return (await loadStock(tx, id)) ?? notFound('listing');
   });
 }

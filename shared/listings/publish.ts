@@ -25,8 +25,6 @@ export interface DraftFacts {
 
 export interface SellerFacts {
   readonly kind: SellerKind;
-  /** False where the seller's ZIP code has no known place. */
-  readonly placed: boolean;
 }
 
 const REBUILT_NOTES_MIN = 40;
@@ -116,7 +114,6 @@ export function missingForPublish(
     ...photoErrors(draft, shotsTaken),
     ...moneyErrors(draft),
     ...wordErrors(draft, seller),
-    ...(seller.placed ? [] : [{ path: 'seller.zip', message: 'Set the ZIP code the unit ships from' }]),
     ...(mailChecked ? [] : [{ path: 'account.mail', message: 'Confirm your e-mail address first' }]),
   ];
 }

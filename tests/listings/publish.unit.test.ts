@@ -27,7 +27,7 @@ const whole: DraftFacts = {
   notes: 'Pulled for engine.',
 };
 const shots = ['left', 'right', 'bell', 'output', 'pan', 'code', 'plug'];
-const yard = { kind: 'yard' as const, placed: true };
+const yard = { kind: 'yard' as const };
 const paths = (
   draft: DraftFacts,
   taken = shots,
@@ -52,14 +52,13 @@ describe('publishing', () => {
       freight: null,
       notes: '',
     };
-    expect(paths(empty, [], { kind: 'yard', placed: false }, false)).toEqual([
+    expect(paths(empty, [], yard, false)).toEqual([
       'caseCode',
       ...checklist('automatic').map((one) => `condition.${one.code}`),
       ...shots.map((shot) => `photos.${shot}`),
       'priceCents',
       'terms',
       'freight',
-      'seller.zip',
       'account.mail',
     ]);
   });
@@ -111,12 +110,12 @@ describe('publishing', () => {
   test('when it is said to be rebuilt, then only a rebuilder may say so, and must tell what was done', () => {
     const rebuilt = { ...whole, rebuilt: true };
     expect(paths(rebuilt)).toEqual(['rebuilt']);
-    expect(paths(rebuilt, shots, { kind: 'rebuilder', placed: true })).toEqual(['notes']);
+    expect(paths(rebuilt, shots, { kind: 'rebuilder' })).toEqual(['notes']);
     const told = {
       ...rebuilt,
       notes: 'Taken apart, cleaned, new frictions, seals, bushings and pump gears, end play set.',
     };
-    expect(paths(told, shots, { kind: 'rebuilder', placed: true })).toEqual([]);
+    expect(paths(told, shots, { kind: 'rebuilder' })).toEqual([]);
   });
 });
 
