@@ -9,7 +9,7 @@ export type Db = NodePgDatabase;
 /** A transaction, or the database itself where one statement is enough. */
 export type Tx = Pick<
   NodePgDatabase,
-  'select' | 'insert' | 'update' | 'delete' | 'execute' | 'selectDistinct' | '$count'
+  'select' | 'insert' | 'update' | 'delete' | 'execute' | 'selectDistinct' | '$count' | 'transaction'
 >;
 
 export interface Database {

@@ -1,5 +1,5 @@
 // One way to run a write: a refusal returned from inside rolls everything back and comes out as the value it is.
-import type { Db, Tx } from './client';
+import type { Tx } from './client';
 import { isRefusal, type Refusal } from '../http/refusal';
 
 class RolledBack extends Error {
@@ -10,7 +10,10 @@ class RolledBack extends Error {
   }
 }
 
-export async function transaction<T>(db: Db, work: (tx: Tx) => Promise<T>): Promise<T | Refusal> {
+export async function transaction<T>(
+  db: Pick<Tx, 'transaction'>,
+  work: (tx: Tx) => Promise<T>,
+): Promise<T | Refusal> {
   try {
     return await db.transaction(async (tx) => {
       const result = await work(tx);

@@ -6,6 +6,7 @@ export interface CheckoutRequest {
   readonly orderId: string;
   readonly orderNumber: string;
   readonly lines: readonly { label: string; cents: Cents }[];
+  /** On the provider's clock, the real one. */
   readonly expiresAt: Date;
   readonly successUrl: string;
   readonly cancelUrl: string;
@@ -20,6 +21,7 @@ export interface CheckoutState {
   readonly amountCents: Cents;
   readonly currency: string;
   readonly paymentIntentId: string | null;
+  readonly chargeId: string | null;
   readonly orderId: string | null;
 }
 
@@ -66,6 +68,9 @@ export class PaymentRefused extends Error {
     this.final = final;
   }
 }
+
+export const isFinalRefusal = (error: unknown): error is PaymentRefused =>
+  error instanceof PaymentRefused && error.final;
 
 export interface PaymentsGateway {
   openCheckout(request: CheckoutRequest, key: string): Promise<{ sessionId: string; url: string }>;
@@ -138,7 +143,8 @@ export function createPaymentsGateway(settings: {
   return {
     openCheckout: (request, key) => explained(openCheckout(stripe, request, key)),
     readCheckout: async (sessionId) => {
-      const session = await stripe.checkout.sessions.retrieve(sessionId);
+      const session = await stripe.checkout.sessions.retrieve(sessionId, { expand: ['payment_intent'] });
+      const intent = typeof session.payment_intent === 'object' ? session.payment_intent : null;
       return {
         sessionId: session.id,
         url: session.url,
@@ -148,6 +154,7 @@ export function createPaymentsGateway(settings: {
         amountCents: session.amount_total ?? 0,
         currency: session.currency ?? 'usd',
         paymentIntentId: text(session.payment_intent),
+        chargeId: text(intent?.latest_charge),
         orderId: session.metadata?.['orderId'] ?? null,
       };
     },

@@ -1,4 +1,4 @@
-// The double-entry ledger, the outbox of provider effects and the provider's raw events.
+// The double-entry ledger, the provider's raw events, and what each of the provider's objects is to us.
 import { sql } from 'drizzle-orm';
 import {
   bigint,
@@ -79,37 +79,6 @@ export const ledgerBalances = pgTable(
   ],
 );
 
-/** Everything that must happen outside, each with an idempotency key made from its meaning. */
-export const outbox = pgTable(
-  'outbox',
-  {
-    seq: bigserial('seq', { mode: 'number' }).primaryKey(),
-    key: text('key').notNull().unique(),
-    kind: text('kind').$type<'refund' | 'transfer' | 'expire_checkout' | 'mail'>().notNull(),
-    orderId: text('order_id'),
-    payload: jsonb('payload').$type<Record<string, unknown>>().notNull(),
-    state: text('state').$type<'waiting' | 'done' | 'dead' | 'blocked'>().notNull().default('waiting'),
-    attempts: integer('attempts').notNull().default(0),
-    notBefore: when('not_before').notNull(),
-    claimedUntil: when('claimed_until'),
-    lastError: text('last_error'),
-    result: jsonb('result').$type<Record<string, unknown>>(),
-    createdAt: when('created_at').notNull(),
-    doneAt: when('done_at'),
-  },
-  (t) => [
-    index('outbox_waiting')
-      .on(t.notBefore, t.seq)
-      .where(sql`state = 'waiting'`),
-    index('outbox_order').on(t.orderId),
-    index('outbox_not_done')
-      .on(t.state)
-      .where(sql`state in ('dead','blocked')`),
-    check('outbox_state', sql`state in ('waiting','done','dead','blocked')`),
-    check('outbox_kind', sql`kind in ('refund','transfer','expire_checkout','mail')`),
-  ],
-);
-
 /** The provider's events as they came, once each; a worker applies them. */
 export const providerEvents = pgTable(
   'provider_events',
@@ -140,6 +109,8 @@ export const providerObjects = pgTable(
     cents: cents('cents').notNull(),
     state: text('state').notNull(),
     outboxKey: text('outbox_key'),
+    /** A payment moves the balance under its charge's id. */
+    providerChargeId: text('provider_charge_id'),
     createdAt: when('created_at').notNull(),
   },
   (t) => [index('provider_objects_order').on(t.orderId), uniqueIndex('provider_objects_key').on(t.outboxKey)],

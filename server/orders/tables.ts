@@ -14,6 +14,7 @@ import {
   timestamp,
   uniqueIndex,
 } from 'drizzle-orm/pg-core';
+import type { ClockName } from '../../shared/orders/clocks';
 import type { CoreState, OutboundState } from '../../shared/orders/states';
 import type { Deduction, ScheduleItem } from '../../shared/orders/settlement';
 import { sellers, users } from '../accounts/tables';
@@ -74,6 +75,8 @@ export const orders = pgTable(
     pickupCode: text('pickup_code').notNull(),
     checkoutSessionId: text('checkout_session_id').unique(),
     checkoutUrl: text('checkout_url'),
+    /** Real time, whatever the demo's clock says; kept so that a repeated call is the same call. */
+    checkoutExpiresAt: when('checkout_expires_at').notNull(),
     paymentIntentId: text('payment_intent_id').unique(),
     carrier: text('carrier'),
     tracking: text('tracking'),
@@ -135,7 +138,7 @@ export const deadlines = pgTable(
     orderId: text('order_id')
       .notNull()
       .references(() => orders.id),
-    clock: text('clock').notNull(),
+    clock: text('clock').$type<ClockName>().notNull(),
     dueAt: when('due_at').notNull(),
     state: text('state').$type<'open' | 'fired' | 'stopped'>().notNull().default('open'),
     createdAt: when('created_at').notNull(),

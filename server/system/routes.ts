@@ -4,7 +4,7 @@ import { advanceClock, durationMs, live, readClock, ready } from '../../shared/s
 import type { Deps } from '../deps';
 import { refuse } from '../http/refusal';
 import { publicRoute, type Route } from '../http/route';
-import { runDue } from '../orders/for-others';
+import { runBackgroundOnce } from '../background-work';
 
 async function checkServices(deps: Deps): Promise<string[]> {
   const checks: [string, () => Promise<unknown>][] = [
@@ -31,7 +31,9 @@ export const systemRoutes: readonly Route[] = [
   publicRoute(live, () => Promise.resolve({ status: 'ok' as const })),
   publicRoute(ready, async (_call, deps) => {
     const down = await checkServices(deps);
-    return down.length === 0 ? { status: 'ok' as const } : refuse('unavailable', `Not answering: ${down.join(', ')}.`);
+    return down.length === 0
+      ? { status: 'ok' as const }
+      : refuse('unavailable', `Not answering: ${down.join(', ')}.`);
   }),
 ];
 
@@ -44,7 +46,7 @@ export const demoRoutes: readonly Route[] = [
   publicRoute(advanceClock, async (call, deps) => {
     if (!deps.demoClock) return refuse('not_found', 'There is no demo clock here.');
     await deps.demoClock.advance(durationMs(call.body.advance) ?? 0);
-    await runDue(deps);
+    await runBackgroundOnce(deps);
     return { now: deps.clock.now().toISOString() };
   }),
 ];

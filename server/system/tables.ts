@@ -8,5 +8,8 @@ export const demoClock = pgTable(
     id: integer('id').primaryKey(),
     offsetMs: bigint('offset_ms', { mode: 'number' }).notNull().default(0),
   },
-  (t) => [check('demo_clock_one_row', sql`${t.id} = 1`), check('demo_clock_forward', sql`${t.offsetMs} >= 0`)],
+  (t) => [
+    check('demo_clock_one_row', sql`${t.id} = 1`),
+    check('demo_clock_forward', sql`${t.offsetMs} >= 0`),
+  ],
 );

@@ -155,6 +155,15 @@ export const reserve = endpoint({
   status: 201,
 });
 
+export const openCheckoutAgain = endpoint({
+  method: 'POST',
+  path: '/api/orders/:id/checkout',
+  summary: 'The address of the hosted checkout page of a reserved order',
+  access: 'party',
+  params: idParams,
+  answer: z.object({ checkoutUrl: z.string() }),
+});
+
 export const listOrders = endpoint({
   method: 'GET',
   path: '/api/orders',
