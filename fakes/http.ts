@@ -50,7 +50,7 @@ export async function listen(settings: {
       await settings.handle({
         method: request.method ?? 'GET',
         rawPath: target.split('?')[0] ?? '/',
-        url: new URL(target, `http://${request.headers.host ?? settings.host}`),
+        url: new URL(`http://${request.headers.host ?? settings.host}${target}`),
         headers: request.headers,
         body: await readBody(request, settings.maxBodyBytes),
         request,
