@@ -1,15 +1,15 @@
 // Counts beside the filters. Counting stops at the cap, so that it costs the same at a thousand units and at a million.
-import type { Pool } from 'pg';
+import type { Pool, QueryResultRow } from 'pg';
 import { COUNT_CAP, type Facets } from '../../shared/listings/card';
 import { conditions, newValues, sellersNear, type Ask, type FacetName } from './search-parts';
-import { named, type Statement } from './search';
+import { named, run, type Statement } from './search';
 
 export interface Counts {
   readonly facets: Facets;
   readonly total: { readonly value: number; readonly exact: boolean };
 }
 
-interface CountRow {
+interface CountRow extends QueryResultRow {
   readonly facet: string;
   readonly value: string | null;
   readonly label: string | null;
@@ -67,9 +67,7 @@ async function runCounts(pool: Pool, ask: Ask): Promise<Counts> {
     ),
     ...narrowed.map((facet) => countStatement(ask, [facet], facet)),
   ];
-  const rows = (await Promise.all(statements.map((one) => pool.query<CountRow>(one)))).flatMap(
-    (result) => result.rows,
-  );
+  const rows = (await Promise.all(statements.map((one) => run<CountRow>(pool, ask.mode, one)))).flat();
   const of = (facet: FacetName) =>
     rows
       .filter((row) => row.facet === facet && row.value !== null)

@@ -1,5 +1,5 @@
 // The SQL of listings besides search: rows with their photos and seller, drafts, stock lists.
-import { and, asc, desc, eq, inArray, isNull, lt, ne, or, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, lt, or, sql } from 'drizzle-orm';
 import { sellers } from '../accounts/tables';
 import type { Tx } from '../db/client';
 import { photos } from '../photos/tables';
@@ -157,16 +157,4 @@ export async function shotCodesOf(tx: Tx, ids: readonly string[]): Promise<Map<s
     .where(inArray(listingPhotos.listingId, [...ids]));
   for (const row of rows) found.set(row.listingId, [...(found.get(row.listingId) ?? []), row.shot]);
   return found;
-}
-
-/** Other units on offer of the same variant or family, cheapest first. */
-export async function similarIds(tx: Tx, row: ListingRow, limit: number): Promise<string[]> {
-  if (!row.familyId) return [];
-  const rows = await tx
-    .select({ id: listings.id })
-    .from(listings)
-    .where(and(sql`status = 'live'`, eq(listings.familyId, row.familyId), ne(listings.id, row.id)))
-    .orderBy(asc(listings.totalCents), asc(listings.id))
-    .limit(limit);
-  return rows.map((found) => found.id);
 }

@@ -141,21 +141,22 @@ export const listings = pgTable(
       ),
       uniqueIndex('listings_tag_code').on(t.tagCode),
       index('listings_live_total').on(t.totalCents, t.id).where(live),
-      index('listings_live_listed').on(t.listedAt.desc(), t.id.desc()).where(live),
+      // Ascending, for newest first too: read backwards it gives "desc, nulls first", which is what ORDER BY desc means.
+      index('listings_live_listed').on(t.listedAt, t.id).where(live),
       index('listings_live_family_total').on(t.familyId, t.totalCents, t.id).where(live),
-      index('listings_live_family_listed').on(t.familyId, t.listedAt.desc(), t.id.desc()).where(live),
+      index('listings_live_family_listed').on(t.familyId, t.listedAt, t.id).where(live),
       index('listings_live_kind_total').on(t.kind, t.totalCents, t.id).where(live),
-      index('listings_live_kind_listed').on(t.kind, t.listedAt.desc(), t.id.desc()).where(live),
+      index('listings_live_kind_listed').on(t.kind, t.listedAt, t.id).where(live),
       index('listings_live_variant_total').on(t.variantId, t.totalCents, t.id).where(live),
       index('listings_live_code').on(t.codeKey, t.totalCents, t.id).where(live),
       index('listings_live_seller_total').on(t.sellerId, t.totalCents, t.id).where(live),
-      index('listings_live_seller_listed').on(t.sellerId, t.listedAt.desc(), t.id.desc()).where(live),
+      index('listings_live_seller_listed').on(t.sellerId, t.listedAt, t.id).where(live),
       index('listings_live_family_seller').on(t.familyId, t.sellerId, t.totalCents, t.id).where(live),
       index('listings_live_words').using('gin', t.familyId, t.search).with({ fastupdate: false }).where(live),
       index('listings_live_title')
         .using('gin', sql`${t.title} gin_trgm_ops`)
         .where(live),
-      index('listings_seller_status').on(t.sellerId, t.status, t.createdAt.desc(), t.id.desc()),
+      index('listings_seller_status').on(t.sellerId, t.status, t.createdAt, t.id),
     ];
   },
 );

@@ -1,5 +1,5 @@
 // Pictures made for tests: four coloured quarters, so that a turn shows, with the metadata a phone writes.
-import sharp from 'sharp';
+import sharp, { type Sharp } from 'sharp';
 
 const QUARTERS = [
   { colour: '#d01818', left: 0, top: 0 },
@@ -9,7 +9,7 @@ const QUARTERS = [
 ];
 
 /** Red, green / blue, yellow; `width` x `height` as the sensor has them, before any turn. */
-export const quarters = (width: number, height: number): sharp.Sharp =>
+export const quarters = (width: number, height: number): Sharp =>
   sharp({ create: { width, height, channels: 3, background: '#000000' } }).composite(
     QUARTERS.map(({ colour, left, top }) => ({
       input: {

@@ -145,17 +145,12 @@ describe('what is refused', () => {
   });
 
   test('when it moves, then a still is asked for', async () => {
-    const frames = await sharp(
-      [0, 1, 2].map((shade) => ({
-        create: {
-          width: 40,
-          height: 40,
-          channels: 3 as const,
-          background: `#${shade * 3}0${shade * 3}0${shade * 3}0`,
-        },
-      })),
-      { join: { animated: true } },
-    )
+    const still = (grey: number): Promise<Buffer> =>
+      sharp({ create: { width: 40, height: 40, channels: 3, background: { r: grey, g: grey, b: grey } } })
+        .png()
+        .toBuffer();
+    const stills = await Promise.all([10, 120, 240].map(still));
+    const frames = await sharp(stills, { join: { animated: true } })
       .webp()
       .toBuffer();
     expect((await refused(frames)).detail).toMatch(/moves/);
