@@ -1,9 +1,8 @@
 // Buckets and objects on disk: bytes in files named by a hash, never by the key; what is known of them in a journal.
 import { createHash, randomBytes } from 'node:crypto';
-import { mkdirSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
-import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { z } from 'zod';
+import { openFiles } from '../files';
 import { openJournal } from '../journal';
 import { StorageError } from './errors';
 
@@ -40,42 +39,6 @@ export interface Objects {
   close(): void;
 }
 
-interface Bytes {
-  write(file: string, data: Buffer): void;
-  read(file: string): Promise<Buffer>;
-  drop(file: string): void;
-}
-
-function inMemory(): Bytes {
-  const held = new Map<string, Buffer>();
-  return {
-    write: (file, data) => void held.set(file, data),
-    read: async (file) => held.get(file) ?? Buffer.alloc(0),
-    drop: (file) => void held.delete(file),
-  };
-}
-
-function onDisk(directory: string): Bytes {
-  mkdirSync(directory, { recursive: true });
-  return {
-    write: (file, data) => {
-      mkdirSync(join(directory, file.slice(0, 2)), { recursive: true });
-      writeFileSync(join(directory, file.slice(0, 2), file), data);
-    },
-    read: (file) => readFile(join(directory, file.slice(0, 2), file)),
-    drop: (file) => rmSync(join(directory, file.slice(0, 2), file), { force: true }),
-  };
-}
-
-/** Files that no object points to, left by a process that was stopped between two writes. */
-function sweep(directory: string, wanted: ReadonlySet<string>): void {
-  for (const folder of readdirSync(directory)) {
-    for (const file of readdirSync(join(directory, folder))) {
-      if (!wanted.has(file)) rmSync(join(directory, folder, file), { force: true });
-    }
-  }
-}
-
 const byBytes = (left: StoredObject, right: StoredObject): number =>
   Buffer.compare(Buffer.from(left.key), Buffer.from(right.key));
 
@@ -83,9 +46,10 @@ export function openObjects(directory: string | undefined, now: () => number): O
   const journal = openJournal(directory);
   const buckets = journal.table('buckets', bucketShape);
   const objects = journal.table('objects', objectShape);
-  const folder = directory === undefined ? null : join(directory, 'objects');
-  const bytes = folder === null ? inMemory() : onDisk(folder);
-  if (folder !== null) sweep(folder, new Set(objects.all().map((object) => object.file)));
+  const bytes = openFiles(
+    directory === undefined ? undefined : join(directory, 'objects'),
+    objects.all().map((object) => object.file),
+  );
   const idOf = (bucket: string, key: string): string => `${bucket}/${key}`;
   const list = (bucket: string): StoredObject[] =>
     objects
