@@ -1,6 +1,7 @@
 // A case code as it is stamped on a cast pad; a character nobody is sure of is amber.
 import clsx from 'clsx';
-import type { CSSProperties, ReactNode } from 'react';
+import type { ReactNode } from 'react';
+import { cssVars } from './css-vars';
 
 interface CodePlateProps {
   /** The code in its groups: ['K66A', '4X', 'D9', '09147', '03']. */
@@ -73,13 +74,11 @@ interface DecodedCodeProps {
   readonly doubtful?: readonly number[];
 }
 
-type Columns = CSSProperties & Readonly<Record<'--decoded-columns' | '--decoded-count', string | number>>;
-
 /** The big form: the plate over brackets, each bracket over its meaning. On a phone the meanings become a list. */
 export function DecodedCode({ groups, doubtful = [] }: DecodedCodeProps) {
   const values = groups.map((group) => group.value);
   const widths = groups.map((group) => `${Math.max(2, group.value.length) * 0.5 + 0.5}fr`).join(' ');
-  const style: Columns = { '--decoded-columns': widths, '--decoded-count': groups.length };
+  const style = cssVars({ '--decoded-columns': widths, '--decoded-count': groups.length });
   return (
     <div className="decoded" style={style}>
       <div className="plate-big" role="img" aria-label={spoken(values, doubtful)}>

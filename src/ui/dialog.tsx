@@ -4,6 +4,7 @@ import { AlertDialog, Dialog as RadixDialog } from 'radix-ui';
 import { useState, type ReactNode } from 'react';
 import { Button } from './button';
 import { Icon } from './icon';
+import { useReturnFocus } from './use-return-focus';
 
 interface DialogProps {
   readonly open: boolean;
@@ -20,11 +21,16 @@ interface DialogProps {
  * backdrop here is ours, and base.css holds the page while `data-holds-page` is there.
  */
 export function Dialog({ open, onClose, title, description, children, actions }: DialogProps) {
+  const returnFocus = useReturnFocus();
   return (
     <RadixDialog.Root open={open} onOpenChange={(next) => !next && onClose()}>
       <RadixDialog.Portal>
         <div className="dialog-back" data-holds-page aria-hidden="true" />
-        <RadixDialog.Content className="dialog" {...(description ? {} : { 'aria-describedby': undefined })}>
+        <RadixDialog.Content
+          className="dialog"
+          {...returnFocus}
+          {...(description ? {} : { 'aria-describedby': undefined })}
+        >
           <div className="dialog-head">
             <RadixDialog.Title>{title}</RadixDialog.Title>
             <RadixDialog.Close className="dialog-close" aria-label="Close">
@@ -68,6 +74,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
     children,
   } = props;
   const [busy, setBusy] = useState(false);
+  const returnFocus = useReturnFocus();
   async function confirm() {
     setBusy(true);
     try {
@@ -81,7 +88,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
     <AlertDialog.Root open={open} onOpenChange={(next) => !next && !busy && onClose()}>
       <AlertDialog.Portal>
         <div className="dialog-back" data-holds-page aria-hidden="true" />
-        <AlertDialog.Content className="dialog">
+        <AlertDialog.Content className="dialog" {...returnFocus}>
           <AlertDialog.Title>{title}</AlertDialog.Title>
           <AlertDialog.Description>{description}</AlertDialog.Description>
           {children}

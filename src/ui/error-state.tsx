@@ -31,7 +31,7 @@ interface ErrorStateProps {
 export function ErrorState({ error, onRetry, actions }: ErrorStateProps) {
   const { title, detail, requestId } = errorWords(error);
   return (
-    <div className="grid gap-14">
+    <div className="grid content-start gap-14">
       <StopBox title={title} announce>
         <p>{detail}</p>
         {requestId && (

@@ -4,6 +4,7 @@ import { Dialog } from 'radix-ui';
 import { useState, type KeyboardEvent } from 'react';
 import { Button } from './button';
 import { Icon } from './icon';
+import { useReturnFocus } from './use-return-focus';
 
 export interface Photo {
   readonly src: string;
@@ -24,6 +25,7 @@ interface PhotoBoxProps {
 
 export function PhotoBox({ photos, index, onIndex }: PhotoBoxProps) {
   const [zoomed, setZoomed] = useState(false);
+  const returnFocus = useReturnFocus();
   const photo = index === null ? undefined : photos[index];
   const show = (next: number) => {
     setZoomed(false);
@@ -39,6 +41,7 @@ export function PhotoBox({ photos, index, onIndex }: PhotoBoxProps) {
       <Dialog.Portal>
         {photo && index !== null && (
           <Dialog.Content
+            {...returnFocus}
             className="photo-box"
             data-holds-page
             aria-describedby={undefined}

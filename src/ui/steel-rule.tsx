@@ -1,5 +1,6 @@
 // A steel rule with ticks: time that runs out (grey gone, red line at today), or an upload that fills up.
 import type { CSSProperties } from 'react';
+import { cssVars } from './css-vars';
 
 interface SteelRuleProps {
   /** 0 to 1 of the rule is behind us. */
@@ -10,12 +11,8 @@ interface SteelRuleProps {
   readonly longEvery?: number;
 }
 
-type RuleStyle = CSSProperties & Readonly<Record<'--steel-ticks' | '--steel-long', number>>;
-
-const scale = (ticks: number, longEvery: number): RuleStyle => ({
-  '--steel-ticks': ticks,
-  '--steel-long': ticks / longEvery,
-});
+const scale = (ticks: number, longEvery: number): CSSProperties =>
+  cssVars({ '--steel-ticks': ticks, '--steel-long': ticks / longEvery });
 
 const percent = (share: number) => `${Math.min(1, Math.max(0, share)) * 100}%`;
 

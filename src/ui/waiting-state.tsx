@@ -1,7 +1,7 @@
 // Waiting: a race whose sprags tip one by one, with words of what is being read or checked.
 import clsx from 'clsx';
-import type { CSSProperties } from 'react';
 import { Sprag } from './art/sprag';
+import { cssVars } from './css-vars';
 
 interface WaitingStateProps {
   /** "Checking joint 3 of 8, plug" or "Reading the stock" */
@@ -13,13 +13,11 @@ interface WaitingStateProps {
   readonly blanks?: number;
 }
 
-type Delay = CSSProperties & Readonly<Record<'--waiting-delay', string>>;
-
 /** Ever slower: seconds after which each sprag tips when the count isn't known. */
 const DELAYS_S = [0.15, 0.5, 1, 1.8, 3, 5, 8];
 const BLANK_WIDTHS = ['92%', '70%', '84%', '58%'];
 
-const delay = (index: number): Delay => ({ '--waiting-delay': `${DELAYS_S[index] ?? 60}s` });
+const delay = (index: number) => cssVars({ '--waiting-delay': `${DELAYS_S[index] ?? 60}s` });
 
 const mark = (index: number, done: number) =>
   index < done ? 'waiting-done' : index === done ? 'waiting-now' : '';

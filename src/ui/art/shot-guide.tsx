@@ -104,8 +104,8 @@ const GUIDES: Readonly<Record<ShotGuideName, ReactNode>> = {
   damage: (
     <>
       <path className="o" d="M40 150V60L78 26H200V150Z" />
-      <path className="o" d="M120 26L112 52 130 70 116 92 128 112" />
       <circle className="o" cx="120" cy="72" r="46" />
+      <path className="o" d="M120 26L112 52 130 70 116 92 128 112" />
       <path className="d" d="M154 104L186 138" />
     </>
   ),
