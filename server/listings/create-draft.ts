@@ -1,7 +1,7 @@
 // Starts a draft for a seller: the unit may already be known from its code, everything else may come later.
-import { randomInt } from 'node:crypto';
 import { hasDuty, type Actor } from '../../shared/accounts/actor';
 import { newId } from '../../shared/kernel/ids';
+import { newTagCode } from '../../shared/kernel/tag-code';
 import type { DraftBody } from '../../shared/listings/contract';
 import { transaction } from '../db/transaction';
 import type { Deps } from '../deps';
@@ -9,17 +9,6 @@ import { notFound, refuse, type Refusal } from '../http/refusal';
 import { changeErrors, columnsOf, derivedOf } from './facts';
 import { insertListing, loadStock, findSeller, updateListing, type Stock } from './queries';
 import { settleUnit } from './unit';
-
-/** No 0, 1, I, L, O or U: it's read off a tag and keyed in by hand. */
-const TAG_LETTERS = '23456789ABCDEFGHJKMNPQRSTVWXYZ';
-
-/** Seven random characters and one that checks them, in two groups: "K7QH-29FD". */
-export function newTagCode(): string {
-  const digits = Array.from({ length: 7 }, () => randomInt(TAG_LETTERS.length));
-  const check = digits.reduce((sum, digit, index) => sum + digit * (index + 2), 0) % TAG_LETTERS.length;
-  const text = [...digits, check].map((digit) => TAG_LETTERS.charAt(digit)).join('');
-  return `${text.slice(0, 4)}-${text.slice(4)}`;
-}
 
 export async function createDraft(deps: Deps, actor: Actor, body: DraftBody): Promise<Stock | Refusal> {
   const { sellerId, ...fields } = body;

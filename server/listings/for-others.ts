@@ -1,9 +1,10 @@
 // What other features may do with listings: hold, free, sell and withdraw one inside their own transaction, and copy its terms.
 import { and, eq, inArray, sql } from 'drizzle-orm';
 import type { Tx } from '../db/client';
-import type { PhotoParty } from '../photos/for-others';
+import { linkPhoto, type PhotoParty } from '../photos/for-others';
 import { isMember } from '../../shared/accounts/actor';
 import type { ListingStatus } from '../../shared/listings/page';
+import { shotsOf, type ShotPhoto } from './queries';
 import { listings } from './tables';
 
 export type ListingRow = typeof listings.$inferSelect;
@@ -52,6 +53,14 @@ export const withdrawListing = (tx: Tx, id: string, now = new Date()): Promise<L
 export async function listingForOrder(tx: Tx, id: string): Promise<ListingRow | null> {
   const [row] = await tx.select().from(listings).where(eq(listings.id, id));
   return row ?? null;
+}
+
+/** The photos of a unit by shot, in the order they are shown: "as listed" beside what arrives. */
+export const listingShots = (tx: Tx, id: string): Promise<ShotPhoto[]> => shotsOf(tx, id);
+
+/** Ties the photos of a unit to an order, so that they stay with it whatever becomes of the listing. */
+export async function keepShotsForOrder(tx: Tx, id: string, orderId: string): Promise<void> {
+  for (const taken of await shotsOf(tx, id)) await linkPhoto(tx, taken.photo.id, 'order', orderId);
 }
 
 const OPEN_TO_ALL: readonly string[] = ['live', 'reserved', 'sold'];
