@@ -29,6 +29,8 @@ const schema = z.object({
   SMTP_URL: z.url({ protocol: /^smtps?$/ }),
   MAIL_FROM: z.string().default('Spragyard <notices@spragyard.example>'),
   PUBLIC_URL: z.url(),
+  /** Multiplies every rate limit; for load tests on this machine. */
+  RATE_LIMIT_FACTOR: z.coerce.number().int().min(1).max(1000).default(1),
   TRUST_PROXY: z.coerce.number().int().min(0).max(5).default(0),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
 });

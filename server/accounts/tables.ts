@@ -143,5 +143,8 @@ export const audit = pgTable(
     objectId: text('object_id').notNull(),
     detail: jsonb('detail').$type<Record<string, unknown>>().notNull().default({}),
   },
-  (t) => [index('audit_object').on(t.objectKind, t.objectId, t.id), index('audit_actor').on(t.actorUserId, t.id)],
+  (t) => [
+    index('audit_object').on(t.objectKind, t.objectId, t.id),
+    index('audit_actor').on(t.actorUserId, t.id),
+  ],
 );

@@ -1,0 +1,139 @@
+// Opening an account, and a seller account with its first owner.
+import { newId } from '../../shared/kernel/ids';
+import type { SellerKind } from '../../shared/accounts/actor';
+import { isUniqueViolation, transaction } from '../db/transaction';
+import type { Tx } from '../db/client';
+import type { Deps } from '../deps';
+import { locateZip } from '../geo/zip';
+import { invalid, isRefusal, type Refusal } from '../http/refusal';
+import { queueMail } from '../notices/for-others';
+import { recordAudit } from './for-others';
+import { hashPassword } from './password';
+import type { SellerRow } from './present';
+import { sellerMembers, sellers, users, type SellerTerms } from './tables';
+import { issueToken } from './tokens';
+
+/** A fair start that the owner changes: amounts are of the order common in the trade (common practice). */
+export const FIRST_TERMS: SellerTerms = {
+  windowDays: 45,
+  depositCents: 40_000,
+  schedule: [
+    { code: 'pan_missing', label: 'Pan missing or holed', cents: 4_000 },
+    { code: 'connector_broken', label: 'Connector or linkage broken', cents: 3_000 },
+    { code: 'converter_missing', label: 'Converter missing', cents: 8_500 },
+    { code: 'small_parts_missing', label: 'Small parts missing', cents: 5_000 },
+    { code: 'case_damage', label: 'Case damaged but usable', cents: 18_000 },
+    { code: 'taken_apart', label: 'Taken apart or in a box', cents: 25_000 },
+    { code: 'not_a_core', label: 'Not a core: wrong unit, case broken through, burnt out', cents: 40_000 },
+  ],
+  returnFreight: 'builder',
+  shipDays: 5,
+  graceDays: 3,
+  outright: true,
+};
+
+export interface NewSeller {
+  readonly name: string;
+  readonly kind: SellerKind;
+  readonly zip: string;
+}
+
+export async function insertSeller(
+  tx: Tx,
+  ownerId: string,
+  input: NewSeller,
+  now: Date,
+  zipPath: string,
+): Promise<SellerRow | Refusal> {
+  const place = locateZip(input.zip);
+  if (!place) return invalid(zipPath, 'We do not know this ZIP code. Check it');
+  const [row] = await tx
+    .insert(sellers)
+    .values({
+      id: newId('slr', now.getTime()),
+      name: input.name,
+      kind: input.kind,
+      zip: input.zip,
+      city: place.city,
+      region: place.state,
+      lat: place.lat,
+      lon: place.lon,
+      timeZone: place.timeZone,
+      terms: FIRST_TERMS,
+      createdAt: now,
+    })
+    .returning();
+  if (!row) throw new Error('the new seller was not returned');
+  await tx
+    .insert(sellerMembers)
+    .values({ sellerId: row.id, userId: ownerId, duties: ['owner', 'lister', 'dock'], createdAt: now });
+  await recordAudit(tx, {
+    at: now,
+    actorUserId: ownerId,
+    actorKind: 'owner',
+    action: 'seller.open',
+    objectKind: 'seller',
+    objectId: row.id,
+    detail: { kind: input.kind },
+  });
+  return row;
+}
+
+export async function mailCheckLink(
+  deps: Deps,
+  tx: Tx,
+  user: { id: string; name: string; email: string },
+  now: Date,
+): Promise<void> {
+  const token = await issueToken(tx, user.id, 'check_mail', now);
+  await queueMail(tx, {
+    to: user.email,
+    mail: {
+      template: 'check_mail',
+      data: { name: user.name, link: `${deps.env.PUBLIC_URL}/verify/${token}` },
+    },
+    key: `mail:check:${user.id}:${now.getTime()}`,
+    now,
+  });
+}
+
+export interface NewAccount {
+  readonly name: string;
+  readonly email: string;
+  readonly password: string;
+  readonly seller?: NewSeller | undefined;
+}
+
+const TAKEN = 'This address already has an account. Sign in, or set a new password';
+
+/** @returns the new user's id */
+export async function openAccount(deps: Deps, input: NewAccount): Promise<string | Refusal> {
+  const now = deps.clock.now();
+  const passwordHash = await hashPassword(input.password);
+  const id = newId('usr', now.getTime());
+  try {
+    return await transaction(deps.db, async (tx): Promise<string | Refusal> => {
+      await tx
+        .insert(users)
+        .values({ id, name: input.name, email: input.email, passwordHash, createdAt: now });
+      if (input.seller) {
+        const opened = await insertSeller(tx, id, input.seller, now, 'seller.zip');
+        if (isRefusal(opened)) return opened;
+      }
+      await mailCheckLink(deps, tx, { id, name: input.name, email: input.email }, now);
+      await recordAudit(tx, {
+        at: now,
+        actorUserId: id,
+        actorKind: 'visitor',
+        action: 'account.open',
+        objectKind: 'user',
+        objectId: id,
+        detail: {},
+      });
+      return id;
+    });
+  } catch (error) {
+    if (isUniqueViolation(error, 'users_email')) return invalid('email', TAKEN);
+    throw error;
+  }
+}
