@@ -65,7 +65,7 @@ ${message.messageId ? `<dt>Message-ID</dt><dd>${escapeHtml(message.messageId)}</
 ${attachmentsOf(message)}
 <dt>As it came</dt><dd><a href="/api/messages/${escapeHtml(message.id)}/raw">source</a></dd>
 </dl></div>
-<div class="columns">
+<div class="columns reading">
 <section aria-labelledby="html"><h2 id="html">As a page</h2>
 ${
   message.html === null

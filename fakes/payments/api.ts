@@ -6,7 +6,7 @@ import type { Fault, FaultKind } from '../faults';
 import { errorForStatus, ProviderError, type ErrorBody } from './errors';
 import { createLookup, expand } from './expand';
 import { decodeForm } from './form-decode';
-import { createIdempotency, fingerprintOf, type Answer } from './idempotency';
+import { createIdempotency, fingerprintOf, type Answer, type Idempotency } from './idempotency';
 import { accountRoutes } from './resources/accounts';
 import { balanceRoutes } from './resources/balance';
 import { checkoutSessionRoutes } from './resources/checkout-sessions';
@@ -72,78 +72,103 @@ function send(response: ServerResponse, answer: Answer, cause: Cause, replayed: 
   response.end(answer.body);
 }
 
+interface Api {
+  readonly world: World;
+  readonly webhooks: Webhooks;
+  readonly idempotency: Idempotency;
+}
+
+const route = createRouter({
+  ...checkoutSessionRoutes,
+  ...paymentRoutes,
+  ...refundRoutes,
+  ...accountRoutes,
+  ...transferRoutes,
+  ...balanceRoutes,
+  ...disputeRoutes,
+  ...eventRoutes,
+  ...taxRoutes,
+});
+
+/** Runs the resource; `keep` says whether the answer is one to remember. */
+function run(world: World, asked: Asked, found: Found, cause: Cause): { answer: Answer; keep: boolean } {
+  const requestId = cause.requestId ?? '';
+  let worked = false;
+  try {
+    const encoded = asked.method === 'GET' ? asked.url.search.slice(1) : asked.body.toString('utf8');
+    const form = decodeForm(encoded);
+    const account = header(asked, 'stripe-account');
+    const result = found.handler({ world, ids: found.ids, form, path: asked.url.pathname, account, cause });
+    worked = true;
+    const paths = Array.isArray(form['expand']) ? form['expand'].map(String) : [];
+    const body = JSON.stringify(expand(result, paths, createLookup(world.state)), null, 2);
+    return { answer: { status: 200, body, requestId }, keep: true };
+  } catch (error) {
+    if (error instanceof ProviderError)
+      return { answer: errorAnswer(error.status, error.body, requestId), keep: error.began || worked };
+    const message = error instanceof Error ? (error.stack ?? error.message) : String(error);
+    process.stderr.write(`payments stand-in: ${asked.method} ${asked.url.pathname}: ${message}\n`);
+    return { answer: errorAnswer(500, errorForStatus(500), requestId), keep: true };
+  }
+}
+
+/** The answer under its key: replayed, or made and remembered. */
+async function answerOnce(
+  { world, webhooks, idempotency }: Api,
+  asked: Asked,
+  found: Found,
+  cause: Cause,
+  fault: Fault | null,
+): Promise<{ answer: Answer; replayed: boolean }> {
+  const key = asked.method === 'POST' ? cause.idempotencyKey : null;
+  const account = header(asked, 'stripe-account') ?? '';
+  const print = fingerprintOf(asked.method, asked.url.pathname, account, asked.body.toString('utf8'));
+  const saved = key === null ? null : idempotency.begin(key, print);
+  if (saved !== null) return { answer: saved, replayed: true };
+  let kept: Answer | null = null;
+  try {
+    if (fault?.kind === 'slow') await pause(faultMs(fault, SLOW_MS));
+    const status = fault?.kind === 'status' ? (fault.code ?? 500) : null;
+    const { answer, keep } =
+      status === null
+        ? run(world, asked, found, cause)
+        : {
+            answer: errorAnswer(status, errorForStatus(status), cause.requestId ?? ''),
+            keep: fault?.keep === true,
+          };
+    kept = keep ? answer : null;
+    return { answer, replayed: false };
+  } finally {
+    if (key !== null) idempotency.finish(key, print, kept);
+    world.state.flush();
+    webhooks.kick();
+  }
+}
+
+async function answerCall(api: Api, asked: Asked, cause: Cause): Promise<void> {
+  const { response } = asked;
+  checkKey(asked, api.world.settings.secretKey);
+  const found = route(asked.method, asked.url.pathname);
+  if (found === null) {
+    throw new ProviderError(404, {
+      type: 'invalid_request_error',
+      message: `Unrecognized request URL (${asked.method}: ${asked.url.pathname}).`,
+    });
+  }
+  const fault = api.world.faults.take([cause.subject], CALL_FAULTS);
+  if (fault?.kind === 'timeout_before' || fault?.kind === 'hang')
+    return dropLater(response, faultMs(fault, TIMEOUT_MS));
+  const { answer, replayed } = await answerOnce(api, asked, found, cause, fault);
+  if (fault?.kind === 'timeout_after') return dropLater(response, faultMs(fault, TIMEOUT_MS));
+  if (fault?.kind === 'late_answer') await pause(faultMs(fault, SLOW_MS));
+  const body = fault?.kind === 'malformed' ? answer.body.slice(0, answer.body.length / 2) : answer.body;
+  send(response, { ...answer, body }, cause, replayed);
+}
+
 /** Handles every call under `/v1/`. */
 export function createApi(world: World, webhooks: Webhooks): (asked: Asked) => Promise<void> {
-  const route = createRouter({
-    ...checkoutSessionRoutes,
-    ...paymentRoutes,
-    ...refundRoutes,
-    ...accountRoutes,
-    ...transferRoutes,
-    ...balanceRoutes,
-    ...disputeRoutes,
-    ...eventRoutes,
-    ...taxRoutes,
-  });
-  const lookup = createLookup(world.state);
-  const idempotency = createIdempotency(world.state, world.settings.now);
-
-  /** Runs the resource; the answer says whether it is one to remember. */
-  const run = (asked: Asked, found: Found, cause: Cause): { answer: Answer; keep: boolean } => {
-    const requestId = cause.requestId ?? '';
-    let worked = false;
-    try {
-      const encoded = asked.method === 'GET' ? asked.url.search.slice(1) : asked.body.toString('utf8');
-      const form = decodeForm(encoded);
-      const account = header(asked, 'stripe-account');
-      const result = found.handler({ world, ids: found.ids, form, path: asked.url.pathname, account, cause });
-      worked = true;
-      const paths = Array.isArray(form['expand']) ? form['expand'].map(String) : [];
-      const body = JSON.stringify(expand(result, paths, lookup), null, 2);
-      return { answer: { status: 200, body, requestId }, keep: true };
-    } catch (error) {
-      if (error instanceof ProviderError)
-        return { answer: errorAnswer(error.status, error.body, requestId), keep: error.began || worked };
-      const message = error instanceof Error ? (error.stack ?? error.message) : String(error);
-      process.stderr.write(`payments stand-in: ${asked.method} ${asked.url.pathname}: ${message}\n`);
-      return { answer: errorAnswer(500, errorForStatus(500), requestId), keep: true };
-    }
-  };
-
-  /** The answer under its key: replayed, or made and remembered. */
-  const answerOnce = async (
-    asked: Asked,
-    found: Found,
-    cause: Cause,
-    fault: Fault | null,
-  ): Promise<{ answer: Answer; replayed: boolean }> => {
-    const key = asked.method === 'POST' ? cause.idempotencyKey : null;
-    const account = header(asked, 'stripe-account') ?? '';
-    const print = fingerprintOf(asked.method, asked.url.pathname, account, asked.body.toString('utf8'));
-    const saved = key === null ? null : idempotency.begin(key, print);
-    if (saved !== null) return { answer: saved, replayed: true };
-    let kept: Answer | null = null;
-    try {
-      if (fault?.kind === 'slow') await pause(faultMs(fault, SLOW_MS));
-      const status = fault?.kind === 'status' ? (fault.code ?? 500) : null;
-      const { answer, keep } =
-        status === null
-          ? run(asked, found, cause)
-          : {
-              answer: errorAnswer(status, errorForStatus(status), cause.requestId ?? ''),
-              keep: fault?.keep === true,
-            };
-      kept = keep ? answer : null;
-      return { answer, replayed: false };
-    } finally {
-      if (key !== null) idempotency.finish(key, print, kept);
-      world.state.flush();
-      webhooks.kick();
-    }
-  };
-
+  const api = { world, webhooks, idempotency: createIdempotency(world.state, world.settings.now) };
   return async (asked) => {
-    const { response } = asked;
     const cause: Cause = {
       subject: `${asked.method} ${asked.url.pathname}`,
       requestId: newId('req', 14),
@@ -151,25 +176,10 @@ export function createApi(world: World, webhooks: Webhooks): (asked: Asked) => P
       apiVersion: header(asked, 'stripe-version') ?? API_VERSION,
     };
     try {
-      checkKey(asked, world.settings.secretKey);
-      const found = route(asked.method, asked.url.pathname);
-      if (found === null) {
-        throw new ProviderError(404, {
-          type: 'invalid_request_error',
-          message: `Unrecognized request URL (${asked.method}: ${asked.url.pathname}).`,
-        });
-      }
-      const fault = world.faults.take([cause.subject], CALL_FAULTS);
-      if (fault?.kind === 'timeout_before' || fault?.kind === 'hang')
-        return dropLater(response, faultMs(fault, TIMEOUT_MS));
-      const { answer, replayed } = await answerOnce(asked, found, cause, fault);
-      if (fault?.kind === 'timeout_after') return dropLater(response, faultMs(fault, TIMEOUT_MS));
-      if (fault?.kind === 'late_answer') await pause(faultMs(fault, SLOW_MS));
-      const cut = fault?.kind === 'malformed' ? answer.body.slice(0, answer.body.length / 2) : answer.body;
-      send(response, { ...answer, body: cut }, cause, replayed);
+      await answerCall(api, asked, cause);
     } catch (error) {
       if (!(error instanceof ProviderError)) throw error;
-      send(response, errorAnswer(error.status, error.body, cause.requestId ?? ''), cause, false);
+      send(asked.response, errorAnswer(error.status, error.body, cause.requestId ?? ''), cause, false);
     }
   };
 }

@@ -1,7 +1,7 @@
 // Puts the payments stand-in together and starts it: in its own process, or inside a test.
 import { join } from 'node:path';
 import { createFaults, type Faults } from '../faults';
-import { answerFaults, listen, sendHtml, sendJson } from '../http';
+import { answerFaults, listen, sendHtml, sendJson, type Listening } from '../http';
 import { createApi } from './api';
 import { answerControl } from './control';
 import { answerPage } from './hosted';
@@ -9,8 +9,8 @@ import type { ProviderEvent } from './model/delivery';
 import { unknownPage } from './pages/checkout-page';
 import { currentSession } from './resources/checkout-sessions';
 import { failRefund } from './resources/refunds';
-import { openState } from './state';
-import { createWebhooks } from './webhooks';
+import { openState, type State } from './state';
+import { createWebhooks, type Webhooks } from './webhooks';
 import { newId, pageCause, type Settings, type World } from './world';
 
 const TICK_MS = 250;
@@ -56,25 +56,18 @@ function tick(world: World): void {
   }
 }
 
-export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Promise<PaymentsFake> {
-  const settings: Settings = { ...DEFAULTS, ...options };
-  const state = openState(options.dataDir === undefined ? undefined : join(options.dataDir, 'payments'));
-  const faults = createFaults();
-  const webhooks = createWebhooks({
-    state,
-    faults,
-    secret: settings.webhookSecret,
-    retryBaseMs: settings.retryBaseMs,
-    url: options.webhookUrl,
-  });
-  const address = { url: '' };
+function createWorld(
+  settings: Settings,
+  parts: { state: State; faults: Faults; webhooks: Webhooks; baseUrl: () => string },
+): World {
+  const { state, faults, webhooks, baseUrl } = parts;
   const seconds = (): number => Math.floor(settings.now() / 1000);
-  const world: World = {
+  return {
     state,
     settings,
     faults,
+    baseUrl,
     seconds,
-    baseUrl: () => address.url,
     emit: (type, object, cause, account) => {
       const event: ProviderEvent = {
         id: newId('evt'),
@@ -92,14 +85,17 @@ export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Prom
       return event;
     },
   };
+}
+
+function serve(options: PaymentsFakeOptions, world: World, webhooks: Webhooks): Promise<Listening> {
   const api = createApi(world, webhooks);
-  const server = await listen({
+  return listen({
     host: options.host ?? '127.0.0.1',
     port: options.port ?? 0,
     maxBodyBytes: MAX_BODY_BYTES,
     handle: async (asked) => {
       if (asked.url.pathname.startsWith('/v1/')) return api(asked);
-      if (answerFaults(asked, faults)) return;
+      if (answerFaults(asked, world.faults)) return;
       if (await answerControl(world, webhooks, asked)) return;
       if (!(await answerPage({ world, webhooks }, asked))) sendHtml(asked.response, 404, unknownPage());
     },
@@ -109,6 +105,17 @@ export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Prom
       else sendJson(response, 500, { error: { type: 'api_error', message: 'The stand-in failed.' } });
     },
   });
+}
+
+export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Promise<PaymentsFake> {
+  const settings: Settings = { ...DEFAULTS, ...options };
+  const state = openState(options.dataDir === undefined ? undefined : join(options.dataDir, 'payments'));
+  const faults = createFaults();
+  const { webhookSecret: secret, retryBaseMs } = settings;
+  const webhooks = createWebhooks({ state, faults, secret, retryBaseMs, url: options.webhookUrl });
+  const address = { url: '' };
+  const world = createWorld(settings, { state, faults, webhooks, baseUrl: () => address.url });
+  const server = await serve(options, world, webhooks);
   address.url = server.url;
   const timer = setInterval(() => {
     tick(world);

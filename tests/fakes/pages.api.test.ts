@@ -73,8 +73,8 @@ const openSession = () =>
 
 async function fillIn(page: Page, number: string): Promise<void> {
   await page.getByLabel('Card number').fill(number);
-  await page.getByLabel('Expiry date').fill('12 / 40');
-  await page.getByLabel('Security code').fill('123');
+  await page.getByLabel('Expiry').fill('12 / 40');
+  await page.getByLabel('CVC').fill('123');
   await page.getByRole('button', { name: 'Pay $650.00' }).click();
 }
 
@@ -91,7 +91,7 @@ describe('when a person pays on the hosted page without script', () => {
         expect(await alert.innerText()).toContain('Your card was declined. Nothing was charged');
         expect(await page.getByLabel('Card number').getAttribute('aria-invalid')).toBe('true');
         expect(await page.getByLabel('Card number').inputValue()).toBe('4000 0000 0000 0002');
-        expect(await page.getByLabel('Security code').inputValue()).toBe('');
+        expect(await page.getByLabel('CVC').inputValue()).toBe('');
         await fillIn(page, '4242 4242 4242 4242');
         await page.waitForURL(`${given.fake.url}/?paid=${session.id}`);
         await page.goto(session.url ?? '');

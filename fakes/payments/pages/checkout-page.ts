@@ -15,8 +15,8 @@ type Field = Decline['field'];
 
 const LABELS: Readonly<Record<Field, string>> = {
   number: 'Card number',
-  expiry: 'Expiry date (MM / YY)',
-  cvc: 'Security code (CVC)',
+  expiry: 'Expiry (MM/YY)',
+  cvc: 'CVC (3 digits)',
 };
 
 function input(field: Field, attributes: string, value: string, decline: Decline | null): string {

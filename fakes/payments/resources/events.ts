@@ -5,7 +5,7 @@ import { readParams } from '../form-decode';
 import { listParams, pageOf } from '../lists';
 import type { ProviderEvent } from '../model/delivery';
 import { idOf, type Routes } from '../router';
-import { renderEvent } from '../webhooks';
+import { renderEvent } from '../webhook-attempt';
 import type { World } from '../world';
 
 const eventListParams = z.strictObject({

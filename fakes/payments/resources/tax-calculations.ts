@@ -1,6 +1,6 @@
 // Tax calculations from the invented rates: one rate for the state that the goods go to, rounded line by line.
 import { z } from 'zod';
-import { badParam, missing, refused } from '../errors';
+import { badParam, missing } from '../errors';
 import { currency, expandParam, integer, metadata, readParams } from '../form-decode';
 import { listParams, pageOf } from '../lists';
 import type { TaxCalculation } from '../model/delivery';
@@ -45,10 +45,12 @@ const createParams = z.strictObject({
   expand: expandParam,
 });
 
+type Behaviour = 'exclusive' | 'inclusive';
+
 type CreateParams = z.output<typeof createParams>;
 
 /** Cents of tax on (or inside) an amount, half a cent rounded away from zero. */
-export function taxOn(amount: number, rateBps: number, kind: 'exclusive' | 'inclusive'): number {
+export function taxOn(amount: number, rateBps: number, kind: Behaviour): number {
   const base = kind === 'exclusive' ? 10_000 : 10_000 + rateBps;
   const tax = Math.round((Math.abs(amount) * rateBps) / base);
   return amount < 0 ? -tax : tax;
@@ -76,81 +78,84 @@ const rateDetails = (state: string, rateBps: number): object => ({
   tax_type: 'sales_tax',
 });
 
-function create({ world, form }: Call): object {
-  const params = readParams(createParams, form);
-  const { state, rateBps } = rateFor(params);
-  const id = newId('taxcalc');
-  const lineItems = params.line_items.map((line) => ({
+interface Taxed {
+  readonly amount: number;
+  readonly tax: number;
+  readonly kind: Behaviour;
+}
+
+/** Every charged line with its tax; the shipping, where there is any, comes last. */
+function taxed(params: CreateParams, rateBps: number): Taxed[] {
+  const charged = params.shipping_cost ? [...params.line_items, params.shipping_cost] : params.line_items;
+  if (new Set(charged.map((line) => line.tax_behavior)).size > 1)
+    throw badParam('Give every line the same tax_behavior.', 'parameter_invalid', 'line_items');
+  return charged.map(({ amount, tax_behavior: kind }) => ({
+    amount,
+    kind,
+    tax: taxOn(amount, rateBps, kind),
+  }));
+}
+
+const lineItemsOf = (params: CreateParams, taxes: readonly Taxed[]): TaxCalculation['lineItems'] =>
+  params.line_items.map((line, index) => ({
     id: newId('tax_li'),
     object: 'tax.calculation_line_item',
     amount: line.amount,
-    amount_tax: taxOn(line.amount, rateBps, line.tax_behavior),
+    amount_tax: taxes[index]?.tax ?? 0,
     livemode: false,
     quantity: line.quantity,
     reference: line.reference ?? null,
     tax_behavior: line.tax_behavior,
     tax_code: line.tax_code ?? null,
   }));
-  const shipping = params.shipping_cost;
-  const charged = [
-    ...lineItems.map((line) => ({ amount: line.amount, tax: line.amount_tax, kind: line.tax_behavior })),
-    ...(shipping
-      ? [
-          {
-            amount: shipping.amount,
-            tax: taxOn(shipping.amount, rateBps, shipping.tax_behavior),
-            kind: shipping.tax_behavior,
-          },
-        ]
-      : []),
-  ];
-  if (new Set(charged.map((line) => line.kind)).size > 1)
-    throw refused('Give every line the same tax_behavior.', 'parameter_invalid', 'line_items');
-  const sumOf = (kind: 'exclusive' | 'inclusive'): number =>
-    charged.filter((line) => line.kind === kind).reduce((sum, line) => sum + line.tax, 0);
-  const [exclusive, inclusive] = [sumOf('exclusive'), sumOf('inclusive')];
-  const amount = charged.reduce((sum, line) => sum + line.amount, 0);
+
+function shippingOf(params: CreateParams, taxes: readonly Taxed[]): object | null {
+  if (params.shipping_cost === undefined) return null;
+  const { amount, tax_behavior: kind, tax_code: code } = params.shipping_cost;
+  return {
+    amount,
+    amount_tax: taxes.at(-1)?.tax ?? 0,
+    tax_behavior: kind,
+    tax_code: code ?? 'txcd_92010001',
+  };
+}
+
+function create({ world, form }: Call): object {
+  const params = readParams(createParams, form);
+  const { state, rateBps } = rateFor(params);
+  const taxes = taxed(params, rateBps);
+  const tax = taxes.reduce((sum, line) => sum + line.tax, 0);
+  const amount = taxes.reduce((sum, line) => sum + line.amount, 0);
+  const inclusive = taxes[0]?.kind === 'inclusive';
+  const id = newId('taxcalc');
+  const { address, address_source } = params.customer_details;
   const answer = {
     id,
     object: 'tax.calculation',
-    amount_total: amount + exclusive,
+    amount_total: inclusive ? amount : amount + tax,
     currency: params.currency,
     customer: null,
-    customer_details: {
-      address: params.customer_details.address,
-      address_source: params.customer_details.address_source,
-      ip_address: null,
-      tax_ids: [],
-      taxability_override: 'none',
-    },
+    customer_details: { address, address_source, ip_address: null, tax_ids: [], taxability_override: 'none' },
     expires_at: world.seconds() + QUOTE_SECONDS,
     livemode: false,
     ship_from_details: null,
-    shipping_cost: shipping
-      ? {
-          amount: shipping.amount,
-          amount_tax: charged.at(-1)?.tax ?? 0,
-          tax_behavior: shipping.tax_behavior,
-          tax_code: shipping.tax_code ?? 'txcd_92010001',
-        }
-      : null,
-    tax_amount_exclusive: exclusive,
-    tax_amount_inclusive: inclusive,
+    shipping_cost: shippingOf(params, taxes),
+    tax_amount_exclusive: inclusive ? 0 : tax,
+    tax_amount_inclusive: inclusive ? tax : 0,
     tax_breakdown: [
       {
-        amount: exclusive + inclusive,
-        inclusive: inclusive !== 0,
+        amount: tax,
+        inclusive,
         tax_rate_details: rateDetails(state, rateBps),
         taxability_reason: rateBps === 0 ? 'not_collecting' : 'standard_rated',
-        taxable_amount: rateBps === 0 ? 0 : amount - inclusive,
+        taxable_amount: rateBps === 0 ? 0 : inclusive ? amount - tax : amount,
       },
     ],
     tax_date: params.tax_date ?? world.seconds(),
   };
-  world.state.taxCalculations.put(id, { id, answer, lineItems });
-  return params.expand.includes('line_items')
-    ? { ...answer, line_items: linesOf({ id, answer, lineItems }) }
-    : answer;
+  const calculation = { id, answer, lineItems: lineItemsOf(params, taxes) };
+  world.state.taxCalculations.put(id, calculation);
+  return params.expand.includes('line_items') ? { ...answer, line_items: linesOf(calculation) } : answer;
 }
 
 const linesOf = (calculation: TaxCalculation): object => ({
