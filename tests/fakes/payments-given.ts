@@ -14,7 +14,7 @@ export interface Given {
   close(): Promise<void>;
 }
 
-export const clientFor = (fake: PaymentsFake, key = SECRET_KEY, timeout = 5_000): Stripe =>
+export const clientFor = (fake: Pick<PaymentsFake, 'port'>, key = SECRET_KEY, timeout = 5_000): Stripe =>
   new Stripe(key, {
     host: '127.0.0.1',
     port: fake.port,

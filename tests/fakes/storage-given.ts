@@ -5,7 +5,7 @@ import { startStorageFake, type StorageFake, type StorageFakeOptions } from '../
 export const BUCKET = 'yard-photos';
 export const CREDENTIALS = { accessKeyId: 'TESTKEY', secretAccessKey: 'test/secret+key' };
 
-export const clientFor = (fake: StorageFake, settings: S3ClientConfig = {}): S3Client =>
+export const clientFor = (fake: Pick<StorageFake, 'url'>, settings: S3ClientConfig = {}): S3Client =>
   new S3Client({
     endpoint: fake.url,
     region: 'us-east-1',
