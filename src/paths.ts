@@ -90,3 +90,9 @@ export const paths = {
   adminAudit: path('/admin/audit'),
   adminHealth: path('/admin/health'),
 } as const;
+
+/** Where to go after signing in: only an address of this site, never one that leads away from it. */
+export function safeNext(next: string | null): string {
+  const isOurs = next !== null && /^\/(?![/\\])/.test(next);
+  return isOurs ? next : paths.home.to();
+}

@@ -2,19 +2,34 @@
 import type { ComponentType } from 'react';
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { BrokenPage } from './pages/broken-page';
+import { Guard, type Needs } from './pages/guard';
 import { NotFoundPage } from './pages/not-found-page';
 import { RootLayout } from './pages/root-layout';
 import { WaitingPage } from './pages/waiting-page';
 
 type LoadPage = () => Promise<ComponentType>;
 
-const page = (pattern: string, load: LoadPage): RouteObject => ({
+/** `needs` left out: anybody may open it. */
+const page = (pattern: string, load: LoadPage, needs?: Needs): RouteObject => ({
   path: pattern,
-  lazy: async () => ({ Component: await load() }),
   errorElement: <BrokenPage />,
+  lazy: async () => {
+    const Loaded = await load();
+    if (!needs) return { Component: Loaded };
+    return {
+      element: (
+        <Guard needs={needs}>
+          <Loaded />
+        </Guard>
+      ),
+    };
+  },
 });
 
-/** One line for each page: `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage))`. */
+/**
+ * One line for each page:
+ * `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),`
+ */
 const pages: RouteObject[] = [];
 
 if (import.meta.env.DEV) {

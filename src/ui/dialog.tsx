@@ -88,7 +88,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
     <AlertDialog.Root open={open} onOpenChange={(next) => !next && !busy && onClose()}>
       <AlertDialog.Portal>
         <div className="dialog-back" data-holds-page aria-hidden="true" />
-        <AlertDialog.Content className="dialog" {...returnFocus}>
+        <AlertDialog.Content className="dialog" aria-modal="true" {...returnFocus}>
           <AlertDialog.Title>{title}</AlertDialog.Title>
           <AlertDialog.Description>{description}</AlertDialog.Description>
           {children}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { paths } from '../../src/paths';
+import { paths, safeNext } from '../../src/paths';
 
 describe('paths', () => {
   it('when an address has a parameter, then the link carries it, encoded', () => {
@@ -19,5 +19,20 @@ describe('paths', () => {
   it('when two pages have an address, then no two have the same', () => {
     const patterns = Object.values(paths).map((one) => one.pattern);
     expect(new Set(patterns).size).toBe(patterns.length);
+  });
+
+  it('when somebody comes back from signing in, then only an address of this site is followed', () => {
+    expect(safeNext('/orders/ord_1?tab=log')).toBe('/orders/ord_1?tab=log');
+    for (const away of [
+      null,
+      '',
+      'orders',
+      '//evil.example',
+      '/\\evil.example',
+      'https://evil.example',
+      'javascript:alert(1)',
+    ]) {
+      expect(safeNext(away)).toBe('/');
+    }
   });
 });
