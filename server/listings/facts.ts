@@ -1,6 +1,7 @@
 // Between a listing's row and the plain facts that the rules of shared/ speak of.
 import type { ChangeBody } from '../../shared/listings/contract';
-import { gradeOf, isQuestion, unitKind, type UnitKind } from '../../shared/listings/condition';
+import { unitKind, type UnitKind } from '../../shared/catalogue/kinds';
+import { gradeOf, isQuestion } from '../../shared/listings/condition';
 import { missingForPublish, type DraftFacts } from '../../shared/listings/publish';
 import { exchangeTerms, totalCents, type ExchangeTerms } from '../../shared/listings/terms';
 import { unitState, type UnitState } from '../../shared/listings/card';

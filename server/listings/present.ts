@@ -3,14 +3,8 @@ import type { FieldError } from '../../shared/kernel/problem';
 import { milesBetween } from '../../shared/kernel/geo';
 import { card, type Card } from '../../shared/listings/card';
 import type { SellerListing, StockItem } from '../../shared/listings/contract';
-import {
-  checklist,
-  gradeOf,
-  GRADE_RULES,
-  hazards,
-  type Answers,
-  type UnitKind,
-} from '../../shared/listings/condition';
+import { type UnitKind } from '../../shared/catalogue/kinds';
+import { checklist, gradeOf, GRADE_RULES, hazards, type Answers } from '../../shared/listings/condition';
 import { listingStatus, type ListingPage } from '../../shared/listings/page';
 import { requiredShots, shotList } from '../../shared/listings/shots';
 import { returnByGrade } from '../../shared/listings/terms';

@@ -1,7 +1,8 @@
 // A unit as search shows it, and the question that search takes; the page's address holds the whole question.
 import { z } from 'zod';
 import { at, cents, id, pageQuery, zip } from '../kernel/fields';
-import { GRADES, UNIT_KINDS, unitKind } from './condition';
+import { UNIT_KINDS, unitKind } from '../catalogue/kinds';
+import { GRADES } from './condition';
 
 export const unitState = z.enum(['in_vehicle', 'pulled']);
 export type UnitState = z.infer<typeof unitState>;

@@ -1,9 +1,6 @@
 // The condition checklist of each kind of unit, and the grade that follows from its answers by a rule both sides can read.
 import { z } from 'zod';
-
-export const UNIT_KINDS = ['automatic', 'manual', 'transfer_case', 'axle'] as const;
-export type UnitKind = (typeof UNIT_KINDS)[number];
-export const unitKind = z.enum(UNIT_KINDS);
+import { UNIT_KINDS, type UnitKind } from '../catalogue/kinds';
 
 export const GRADES = ['A', 'B', 'C', 'D'] as const;
 export type Grade = (typeof GRADES)[number];

@@ -5,7 +5,8 @@ import { at, cents, id, idParams, line, page, pageQuery, paragraph, version, zip
 import { fieldError } from '../kernel/problem';
 import { photo } from '../photos/contract';
 import { searchAnswer, searchQuery, unitState } from './card';
-import { answers, GRADES, unitKind } from './condition';
+import { unitKind } from '../catalogue/kinds';
+import { answers, GRADES } from './condition';
 import { freightFigures } from './freight';
 import { conditionReport, listingPage, listingStatus, shotEntry } from './page';
 import { SHOT_CODES } from './shots';

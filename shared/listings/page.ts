@@ -3,7 +3,8 @@ import { z } from 'zod';
 import { at, cents, id, zip } from '../kernel/fields';
 import { photo } from '../photos/contract';
 import { card, fitVerdict, unitState } from './card';
-import { answer, GRADES, unitKind } from './condition';
+import { unitKind } from '../catalogue/kinds';
+import { answer, GRADES } from './condition';
 import { freightFigures } from './freight';
 import { returnFreight, scheduleItem } from './terms';
 

@@ -1,5 +1,6 @@
 // The shot list of each kind of unit: nine pictures in a fixed order, taken again when the old unit comes back.
-import { effectOf, UNIT_KINDS, type Answers, type UnitKind } from './condition';
+import { UNIT_KINDS, type UnitKind } from '../catalogue/kinds';
+import { effectOf, type Answers } from './condition';
 
 export interface Shot {
   readonly code: string;

@@ -3,7 +3,8 @@ import { z } from 'zod';
 import { cents } from '../kernel/fields';
 import type { Cents } from '../kernel/money';
 import type { FieldError } from '../kernel/problem';
-import { effectOf, type FaultEffect, type Grade, type UnitKind } from './condition';
+import { type UnitKind } from '../catalogue/kinds';
+import { effectOf, type FaultEffect, type Grade } from './condition';
 
 export const WINDOW_DAYS_MIN = 7;
 export const WINDOW_DAYS_MAX = 180;

@@ -1,6 +1,7 @@
 // The grade follows from the checklist, and one more fault never makes it better.
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { UNIT_KINDS, type UnitKind } from '../../shared/catalogue/kinds';
 import {
   checklist,
   effectOf,
@@ -8,10 +9,8 @@ import {
   gradeOf,
   hazards,
   numberRemoved,
-  UNIT_KINDS,
   type Answer,
   type Answers,
-  type UnitKind,
 } from '../../shared/listings/condition';
 
 const allYes = (kind: UnitKind): Answers =>

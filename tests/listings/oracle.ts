@@ -50,7 +50,9 @@ function matchesWords(row: Row, text: string): boolean {
   const asked = text.toLowerCase().split(/\s+/);
   return asked.every((word, index) => {
     if (word.startsWith('-')) return !tokens.includes(word.slice(1));
-    return index === asked.length - 1 ? tokens.some((token) => token.startsWith(word)) : tokens.includes(word);
+    return index === asked.length - 1
+      ? tokens.some((token) => token.startsWith(word))
+      : tokens.includes(word);
   });
 }
 
@@ -82,7 +84,8 @@ function passes(row: Row, ask: Question, matched: Matched | 'nothing', without?:
     (without === 'terms' || terms === undefined || (terms === 'exchange' ? row.exchange : row.outright)) &&
     (ask.minCents === undefined || row.totalCents >= ask.minCents) &&
     (ask.maxCents === undefined || row.totalCents <= ask.maxCents) &&
-    (ask.withinMiles === undefined || (ask.from !== undefined && milesBetween(ask.from, row) <= ask.withinMiles))
+    (ask.withinMiles === undefined ||
+      (ask.from !== undefined && milesBetween(ask.from, row) <= ask.withinMiles))
   );
 }
 

@@ -1,7 +1,8 @@
 // What keeps a draft from being published, by name; the shot lists; and the words a used unit may not claim.
 import { describe, expect, test } from 'vitest';
 import { claimsIn } from '../../shared/listings/claims';
-import { checklist, UNIT_KINDS, type Answers } from '../../shared/listings/condition';
+import { UNIT_KINDS } from '../../shared/catalogue/kinds';
+import { checklist, type Answers } from '../../shared/listings/condition';
 import { missingForPublish, type DraftFacts } from '../../shared/listings/publish';
 import { requiredShots, shotList, SHOT_CODES } from '../../shared/listings/shots';
 
