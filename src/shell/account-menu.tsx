@@ -22,25 +22,24 @@ export function AccountMenu({ account, links }: AccountMenuProps) {
         </span>
         <Icon of={ChevronDown} />
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content className="menu" align="end" sideOffset={5} collisionPadding={8}>
-          <DropdownMenu.Label className="menu-who">
-            <b className="b">{account.name}</b>
-            <span className="sm mute block">{account.email}</span>
-          </DropdownMenu.Label>
-          {links.map((link) => (
-            <DropdownMenu.Item key={link.to} asChild>
-              <Link className="menu-item" to={link.to}>
-                {link.label}
-              </Link>
-            </DropdownMenu.Item>
-          ))}
-          <DropdownMenu.Item className="menu-item" onSelect={account.onSignOut}>
-            <Icon of={LogOut} />
-            Sign out
+      {/* Drawn in its place, so that it stays inside the header's landmark. */}
+      <DropdownMenu.Content className="menu" align="end" sideOffset={5} collisionPadding={8}>
+        <DropdownMenu.Label className="menu-who">
+          <b className="b">{account.name}</b>
+          <span className="sm mute block">{account.email}</span>
+        </DropdownMenu.Label>
+        {links.map((link) => (
+          <DropdownMenu.Item key={link.to} asChild>
+            <Link className="menu-item" to={link.to}>
+              {link.label}
+            </Link>
           </DropdownMenu.Item>
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
+        ))}
+        <DropdownMenu.Item className="menu-item" onSelect={account.onSignOut}>
+          <Icon of={LogOut} />
+          Sign out
+        </DropdownMenu.Item>
+      </DropdownMenu.Content>
     </DropdownMenu.Root>
   );
 }

@@ -22,11 +22,16 @@ const VISITOR_LINKS: readonly MenuLink[] = [
   { label: 'Make an account', to: paths.signUp.to() },
 ];
 
+const YARD_LINKS: readonly MenuLink[] = [
+  { label: 'Yard desk', to: paths.yard.to() },
+  { label: 'List a unit', to: paths.newListing.to() },
+];
+
 /** The desks a person may sit at, and their account. */
 function accountLinks(account: ShellAccount): MenuLink[] {
   return [
     { label: 'My orders', to: paths.orders.to() },
-    ...(account.isMember ? [{ label: 'Yard desk', to: paths.yard.to() }] : []),
+    ...(account.isMember ? YARD_LINKS : []),
     ...(account.isAdmin ? [{ label: 'Admin desk', to: paths.admin.to() }] : []),
     { label: 'Account', to: paths.account.to() },
   ];
