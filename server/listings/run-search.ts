@@ -18,7 +18,10 @@ function placeOf(query: SearchQuery): Point | null | Refusal {
   return place;
 }
 
-export async function runSearch(deps: Deps, query: SearchQuery): Promise<SearchAnswer | Refusal> {
+export async function runSearch(
+  deps: Pick<Deps, 'pool'>,
+  query: SearchQuery,
+): Promise<SearchAnswer | Refusal> {
   const from = placeOf(query);
   if (from && 'refusal' in from) return from;
   const place = query.cursor === undefined ? null : readCursor(query.cursor);

@@ -68,7 +68,7 @@ function matchClause(ask: Ask, values: Values): string | null {
     case 'words':
       return wordsClause(text, values);
     case 'near':
-      return `${values.take(text)} <% l.title`;
+      return `${values.take(text)} <% (l.title || ' ' || l.words)`;
   }
 }
 

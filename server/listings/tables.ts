@@ -153,8 +153,8 @@ export const listings = pgTable(
       index('listings_live_seller_listed').on(t.sellerId, t.listedAt, t.id).where(live),
       index('listings_live_family_seller').on(t.familyId, t.sellerId, t.totalCents, t.id).where(live),
       index('listings_live_words').using('gin', t.familyId, t.search).with({ fastupdate: false }).where(live),
-      index('listings_live_title')
-        .using('gin', sql`${t.title} gin_trgm_ops`)
+      index('listings_live_near')
+        .using('gin', sql`(title || ' ' || words) gin_trgm_ops`)
         .where(live),
       index('listings_seller_status').on(t.sellerId, t.status, t.createdAt, t.id),
     ];
