@@ -13,7 +13,7 @@ import { presentCard, presentCondition, presentShots, presentTerms } from './pre
 import { findDonor, loadStock, type Stock } from './queries';
 import { pageStatement, run, type CardRow } from './search';
 import type { Point } from './search-parts';
-import { readCode, unitOf } from './unit';
+import { readCodeOf, unitOf } from './unit';
 
 /** What is known of a seller's orders; null where nothing was sold yet. */
 export type RecordOf = (deps: Deps, sellerId: string) => Promise<TrackRecord | null>;
@@ -90,7 +90,7 @@ export async function getListingPage(
     variantName: unit.variantName,
     family: unit.family,
     caseCode: row.caseCode,
-    code: await readCode(deps.db, row.caseCode, unit.variantId),
+    code: await readCodeOf(deps.db, row.caseCode, unit.variantId),
     tagCode: row.tagCode,
     mileage: row.mileage,
     // The vehicle's own number stays private: it is nobody's business but the yard's.

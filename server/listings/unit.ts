@@ -4,6 +4,7 @@ import { familyName } from '../../shared/catalogue/family';
 import type { UnitKind } from '../../shared/catalogue/kinds';
 import type { ChangeBody } from '../../shared/listings/contract';
 import type { ListingPage } from '../../shared/listings/page';
+import { codeBook, readCode, type BookEntry } from '../../shared/reading/read-code';
 import { families, variants } from '../catalogue/tables';
 import type { Tx } from '../db/client';
 import { invalid, isRefusal, type Refusal } from '../http/refusal';
@@ -103,10 +104,24 @@ export async function settleUnit(
   return { columns: body.kind !== undefined && !before?.variantId ? { kind: body.kind } : {} };
 }
 
-async function variantByCode(_tx: Tx, _text: string): Promise<string | null> {
-  return null;
+const bookOf = async (tx: Tx, variantId?: string): Promise<BookEntry[]> => {
+  const rows = await tx
+    .select({ variant: variants, family: families })
+    .from(variants)
+    .innerJoin(families, eq(families.id, variants.familyId))
+    .where(variantId === undefined ? undefined : eq(variants.id, variantId));
+  return rows.flatMap(({ variant, family }) =>
+    codeBook([family], [{ ...variant, modelYears: { from: variant.yearFrom, to: variant.yearTo } }]),
+  );
+};
+
+async function variantByCode(tx: Tx, text: string): Promise<string | null> {
+  const { candidates, verdict } = readCode(text, await bookOf(tx));
+  return verdict === 'cannot_tell' ? null : (candidates[0]?.variantId ?? null);
 }
 
-export async function readCode(_tx: Tx, _text: string, _variantId: string): Promise<ListingPage['code']> {
-  return null;
+/** The code taken apart as this variant bears it; null where it isn't one of its codes. */
+export async function readCodeOf(tx: Tx, text: string, variantId: string): Promise<ListingPage['code']> {
+  const [candidate] = readCode(text, await bookOf(tx, variantId)).candidates;
+  return candidate ? { text, segments: [...candidate.segments], builtOn: candidate.builtOn } : null;
 }
