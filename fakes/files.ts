@@ -3,7 +3,7 @@ import { mkdirSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 
-export interface Files {
+interface Files {
   /** @param file a name made by the stand-in itself: letters, digits, dashes and dots */
   write(file: string, data: Buffer): void;
   read(file: string): Promise<Buffer>;

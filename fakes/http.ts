@@ -27,8 +27,8 @@ export const pause = (ms: number): Promise<void> => new Promise((resolve) => set
 async function readBody(request: IncomingMessage, maxBytes: number): Promise<Buffer> {
   const parts: Buffer[] = [];
   let bytes = 0;
-  for await (const part of request) {
-    const chunk = Buffer.from(part);
+  const chunks: AsyncIterable<Buffer> = request;
+  for await (const chunk of chunks) {
     bytes += chunk.byteLength;
     if (bytes <= maxBytes) parts.push(chunk);
   }

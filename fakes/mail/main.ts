@@ -18,5 +18,5 @@ await run(async () => {
     webPort: env.MAIL_WEB_PORT,
     dataDir: env.DATA_DIR,
   });
-  return { ready: `Mail stand-in ready at ${fake.smtpUrl}, inbox at ${fake.url}`, close: fake.close };
+  return { ready: `Mail stand-in ready at ${fake.smtpUrl}, inbox at ${fake.url}`, close: () => fake.close() };
 });

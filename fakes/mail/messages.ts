@@ -89,6 +89,6 @@ export function openMessages(directory: string | undefined, now: () => number): 
       for (const message of messages.all()) drop(message.id);
       journal.flush();
     },
-    close: journal.close,
+    close: () => journal.close(),
   };
 }

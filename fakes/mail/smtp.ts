@@ -24,14 +24,15 @@ class Refusal extends Error {
   }
 }
 
-export interface Smtp {
+interface Smtp {
   readonly port: number;
   close(): Promise<void>;
 }
 
 async function readAll(stream: SMTPServerDataStream): Promise<Buffer> {
   const parts: Buffer[] = [];
-  for await (const part of stream) parts.push(Buffer.from(part));
+  const chunks: AsyncIterable<Buffer> = stream;
+  for await (const chunk of chunks) parts.push(chunk);
   if (stream.sizeExceeded) throw new Refusal(552, 'Message exceeds fixed maximum message size');
   return Buffer.concat(parts);
 }

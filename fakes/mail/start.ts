@@ -8,7 +8,7 @@ import { startSmtp } from './smtp';
 
 const MAX_BODY_BYTES = 100_000;
 
-export interface MailFakeOptions {
+interface MailFakeOptions {
   readonly host?: string;
   /** 0 takes a free port. */
   readonly smtpPort?: number;
@@ -65,7 +65,7 @@ export async function startMailFake(options: MailFakeOptions = {}): Promise<Mail
     webPort: web.port,
     faults,
     messages: (to) => messages.list(to),
-    clear: messages.clear,
+    clear: () => messages.clear(),
     close: async () => {
       await Promise.all([web.close(), smtp.close()]);
       messages.close();

@@ -140,7 +140,7 @@ async function answerOnce(
     return { answer, replayed: false };
   } finally {
     if (key !== null) idempotency.finish(key, print, kept);
-    world.state.flush();
+    world.state.journal.flush();
     webhooks.kick();
   }
 }
@@ -167,7 +167,7 @@ async function answerCall(api: Api, asked: Asked, cause: Cause): Promise<void> {
 
 /** Handles every call under `/v1/`. */
 export function createApi(world: World, webhooks: Webhooks): (asked: Asked) => Promise<void> {
-  const api = { world, webhooks, idempotency: createIdempotency(world.state, world.settings.now) };
+  const api = { world, webhooks, idempotency: createIdempotency(world.state, () => world.settings.now()) };
   return async (asked) => {
     const cause: Cause = {
       subject: `${asked.method} ${asked.url.pathname}`,

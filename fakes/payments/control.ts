@@ -62,7 +62,8 @@ const CONTROLS: Readonly<Record<string, Control>> = {
 };
 
 const stateOf = (world: World): object => {
-  const { flush: _flush, close: _close, ...tables } = world.state;
+  const { journal, ...tables } = world.state;
+  journal.flush();
   return {
     balance: platformBalance(world, 'usd'),
     faults: world.faults.list(),
@@ -84,11 +85,11 @@ export async function answerControl(world: World, webhooks: Webhooks, asked: Ask
   try {
     const body: unknown = JSON.parse(asked.body.toString('utf8') || '{}');
     const result = control(world, id, body, pageCause(route));
-    world.state.flush();
+    world.state.journal.flush();
     await webhooks.settled(SETTLE_MS);
     sendJson(response, 200, result);
   } catch (error) {
-    world.state.flush();
+    world.state.journal.flush();
     webhooks.kick();
     if (error instanceof ProviderError) sendJson(response, error.status, { error: error.body });
     else if (error instanceof z.ZodError)

@@ -2,7 +2,7 @@
 import { z } from 'zod';
 import { badParam } from './errors';
 
-export type FormValue = string | FormValue[] | { [key: string]: FormValue };
+type FormValue = string | FormValue[] | { [key: string]: FormValue };
 type Branch = Map<string, string | Branch>;
 
 const NAME = /^([^[\]]+)((?:\[[^[\]]*\])*)$/;
@@ -24,7 +24,7 @@ function place(root: Branch, path: readonly string[], value: string): void {
       return;
     }
     const found = at.get(key);
-    const next: Branch = found instanceof Map ? found : new Map();
+    const next = typeof found === 'object' ? found : new Map<string, string | Branch>();
     at.set(key, next);
     at = next;
   }

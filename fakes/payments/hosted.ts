@@ -44,7 +44,7 @@ async function checkout({ world, webhooks }: Shown, asked: Asked, id: string): P
   const lines = world.state.sessionPlans.get(id)?.lineItems ?? [];
   if (asked.method !== 'POST') {
     const session = currentSession(world, id, cause);
-    world.state.flush();
+    world.state.journal.flush();
     webhooks.kick();
     if (session === undefined) return sendHtml(response, 404, unknownPage());
     if (session.status !== 'open')
@@ -53,7 +53,7 @@ async function checkout({ world, webhooks }: Shown, asked: Asked, id: string): P
   }
   const { card, typed } = readCard(new URLSearchParams(asked.body.toString('utf8')));
   const result = payWithCard(world, id, card, cause);
-  world.state.flush();
+  world.state.journal.flush();
   if (result.kind === 'unknown') return sendHtml(response, 404, unknownPage());
   // The event goes out before the person is sent back, so that the product usually knows by then.
   await webhooks.settled(SETTLE_MS);
@@ -71,7 +71,7 @@ async function onboarding({ world, webhooks }: Shown, asked: Asked, id: string):
   if (link.expiresAt <= world.seconds()) return sendHtml(response, 410, expiredLinkPage(link.refreshUrl));
   if (asked.method !== 'POST') return sendHtml(response, 200, onboardingPage(link, account));
   completeOnboarding(world, account, pageCause('POST /onboard/:link'));
-  world.state.flush();
+  world.state.journal.flush();
   await webhooks.settled(SETTLE_MS);
   redirect(asked, link.returnUrl);
 }

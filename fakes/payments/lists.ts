@@ -29,7 +29,7 @@ interface Paging {
   readonly created?: z.output<typeof createdParam> | undefined;
 }
 
-export interface ListAnswer<T> {
+interface ListAnswer<T> {
   readonly object: 'list';
   readonly data: T[];
   readonly has_more: boolean;

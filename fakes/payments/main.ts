@@ -28,5 +28,5 @@ await run(async () => {
     availableDelayMs: env.AVAILABLE_DELAY_MS,
     strictExpiry: env.STRICT_EXPIRY === '1',
   });
-  return { ready: `Payments stand-in ready at ${fake.url}`, close: fake.close };
+  return { ready: `Payments stand-in ready at ${fake.url}`, close: () => fake.close() };
 });

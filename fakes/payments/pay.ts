@@ -4,7 +4,7 @@ import type { Charge, PaymentIntent, Session } from './model/payments';
 import { currentSession } from './resources/checkout-sessions';
 import { move, newId, type Cause, type World } from './world';
 
-export type Paid =
+type Paid =
   | { readonly kind: 'paid'; readonly session: Session }
   | { readonly kind: 'declined'; readonly session: Session; readonly decline: Decline }
   | { readonly kind: 'closed'; readonly session: Session }

@@ -13,7 +13,7 @@ export interface Call {
   readonly cause: Cause;
 }
 
-export type Handler = (call: Call) => object;
+type Handler = (call: Call) => object;
 export type Routes = Readonly<Record<string, Handler>>;
 
 export interface Found {

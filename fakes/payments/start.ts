@@ -119,7 +119,7 @@ export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Prom
   address.url = server.url;
   const timer = setInterval(() => {
     tick(world);
-    state.flush();
+    state.journal.flush();
     webhooks.kick();
   }, TICK_MS);
   timer.unref();
@@ -128,13 +128,13 @@ export async function startPaymentsFake(options: PaymentsFakeOptions = {}): Prom
     url: server.url,
     port: server.port,
     faults,
-    setWebhookUrl: webhooks.setUrl,
+    setWebhookUrl: (url) => webhooks.setUrl(url),
     webhooksSettled: () => webhooks.settled(10_000),
     close: async () => {
       clearInterval(timer);
       await server.close();
       await webhooks.close();
-      state.close();
+      state.journal.close();
     },
   };
 }

@@ -9,8 +9,7 @@ export type State = ReturnType<typeof openState>;
 export function openState(directory: string | undefined) {
   const journal: Journal = openJournal(directory);
   return {
-    flush: journal.flush,
-    close: journal.close,
+    journal,
     sessions: journal.table('sessions', payments.sessionShape),
     sessionPlans: journal.table('sessionPlans', payments.sessionPlanShape),
     paymentIntents: journal.table('paymentIntents', payments.paymentIntentShape),

@@ -60,7 +60,7 @@ async function deliver(
     const givenUp = attempts >= GIVE_UP_ATTEMPTS;
     queue.save({ ...delivery, attempts, dueAtMs: Date.now() + wait, givenUp, lastAnswer: failure });
   }
-  state.flush();
+  state.journal.flush();
 }
 
 export function createWebhooks(settings: Settings): Webhooks {

@@ -91,7 +91,7 @@ export function move(world: World, movement: Movement): BalanceTransaction {
   return world.state.balanceTransactions.put(transaction.id, transaction);
 }
 
-export interface Sums {
+interface Sums {
   readonly available: number;
   readonly pending: number;
 }

@@ -2,7 +2,7 @@
 import { StorageError } from './errors';
 import { hmac, sha256, type Verified } from './sigv4';
 
-export interface Unchunked {
+interface Unchunked {
   readonly data: Buffer;
   /** Headers that came after the last piece, by lower-case name. */
   readonly trailers: Readonly<Record<string, string>>;

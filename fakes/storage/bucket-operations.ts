@@ -17,7 +17,7 @@ const after = (left: string, right: string): boolean =>
   Buffer.compare(Buffer.from(left), Buffer.from(right)) > 0;
 
 /** @param sorted objects of the bucket in the order of their keys */
-export function listPage(
+function listPage(
   sorted: readonly StoredObject[],
   asked: { prefix: string; delimiter: string; start: string; most: number },
 ): Listed {

@@ -22,5 +22,5 @@ await run(async () => {
     secretAccessKey: env.S3_SECRET_ACCESS_KEY,
     bucket: env.S3_BUCKET,
   });
-  return { ready: `Storage stand-in ready at ${fake.url}`, close: fake.close };
+  return { ready: `Storage stand-in ready at ${fake.url}`, close: () => fake.close() };
 });

@@ -32,7 +32,7 @@ function describedBy(request: StorageRequest): Pick<StoredObject, 'headers' | 'u
   if (encoding.length > 0) headers['content-encoding'] = encoding.join(',');
   const userMetadata = Object.keys(asked.headers)
     .filter((name) => name.startsWith('x-amz-meta-'))
-    .map((name) => [name.slice('x-amz-meta-'.length), headerOf(asked, name) ?? '']);
+    .map((name): [string, string] => [name.slice('x-amz-meta-'.length), headerOf(asked, name) ?? '']);
   return { headers, userMetadata: Object.fromEntries(userMetadata) };
 }
 
@@ -120,7 +120,7 @@ function isUnchanged(request: StorageRequest, object: StoredObject): boolean {
 }
 
 /** First and last byte of a single range, or null when the whole object is to be sent. */
-export function readRange(range: string | null, bytes: number): { first: number; last: number } | null {
+function readRange(range: string | null, bytes: number): { first: number; last: number } | null {
   const parts = /^bytes=(\d*)-(\d*)$/.exec(range ?? '');
   if (parts === null || (parts[1] === '' && parts[2] === '')) return null;
   const [, from = '', to = ''] = parts;

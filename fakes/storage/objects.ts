@@ -22,7 +22,7 @@ const objectShape = z.object({
 const bucketShape = z.object({ name: z.string(), createdAtMs: z.number() });
 
 export type StoredObject = z.output<typeof objectShape>;
-export type NewObject = Omit<StoredObject, 'file' | 'bytes' | 'modifiedAtMs'>;
+type NewObject = Omit<StoredObject, 'file' | 'bytes' | 'modifiedAtMs'>;
 
 export interface Objects {
   makeBucket(name: string): void;
@@ -96,6 +96,6 @@ export function openObjects(directory: string | undefined, now: () => number): O
       journal.flush();
       bytes.drop(object.file);
     },
-    close: journal.close,
+    close: () => journal.close(),
   };
 }

@@ -12,7 +12,7 @@ import { StorageError } from './errors';
 import { copyObject, deleteObject, getObject, putObject } from './object-operations';
 import { headerOf, type StorageAnswer, type StorageRequest } from './request';
 
-export interface Operation {
+interface Operation {
   readonly name: string;
   run(request: StorageRequest): StorageAnswer | Promise<StorageAnswer>;
 }

@@ -60,11 +60,7 @@ const single = (value: string | string[] | undefined): string | null =>
 
 const byText = (left: string, right: string): number => (left < right ? -1 : left > right ? 1 : 0);
 
-export function canonicalRequest(
-  request: SignedRequest,
-  signedHeaders: readonly string[],
-  payload: string,
-): string {
+function canonicalRequest(request: SignedRequest, signedHeaders: readonly string[], payload: string): string {
   const path = request.rawPath.split('/').map((segment) => encode(decodePath(segment)));
   const query = Array.from(request.query)
     .filter(([name]) => name !== 'X-Amz-Signature')

@@ -1,7 +1,7 @@
 // The little XML that the object store's API needs: elements out, keys of a delete request in.
 import { StorageError } from './errors';
 
-export type Xml = string | number | boolean | readonly Xml[] | { readonly [name: string]: Xml | undefined };
+type Xml = string | number | boolean | readonly Xml[] | { readonly [name: string]: Xml | undefined };
 
 const ENTITIES: Readonly<Record<string, string>> = {
   '&': '&amp;',

@@ -79,7 +79,8 @@ export async function givenPaid(
   const session = await stripe.checkout.sessions.create(sessionParams(cents));
   expect((await control(fake, `/_complete/${session.id}`)).status).toBe(200);
   const paid = await stripe.checkout.sessions.retrieve(session.id);
-  return { intent: String(paid.payment_intent), session: session.id };
+  if (typeof paid.payment_intent !== 'string') throw new Error('the session has no payment');
+  return { intent: paid.payment_intent, session: session.id };
 }
 
 export async function givenOpenAccount({ fake, stripe }: Given): Promise<string> {

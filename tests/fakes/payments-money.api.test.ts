@@ -188,10 +188,11 @@ describe('when a charge is disputed', () => {
       const { stripe, fake, hooks } = given;
       const { intent } = await givenPaid(given, 65_000);
       const before = await available();
-      const opened = await (await control(fake, `/_dispute/${intent}`, { reason: 'fraudulent' })).json();
+      await control(fake, `/_dispute/${intent}`, { reason: 'fraudulent' });
       await hooks.until('charge.dispute.created');
       expect(await available()).toBe(before - 65_000);
-      const dispute = await stripe.disputes.retrieve(opened.id);
+      const [listed] = (await stripe.disputes.list({ payment_intent: intent })).data;
+      const dispute = await stripe.disputes.retrieve(listed?.id ?? '');
       expect(dispute).toMatchObject({
         status: 'needs_response',
         amount: 65_000,

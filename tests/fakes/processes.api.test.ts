@@ -124,7 +124,7 @@ test(
     await transport.sendMail({ from: 'a@example.com', to: 'b@example.com', subject: 'kept', text: 'text' });
     await end(first, 'SIGKILL');
     const second = await start('mail', env);
-    const list = await (
+    const list: unknown = await (
       await fetch(`http://127.0.0.1:${portIn(second.ready, 'http://')}/api/messages`)
     ).json();
     expect(list).toMatchObject([{ to: 'b@example.com', subject: 'kept' }]);

@@ -1,12 +1,14 @@
 // A small endpoint for the payments stand-in's events: keeps what arrives and answers as it is told.
 import { createServer } from 'node:http';
 import { setTimeout as pause } from 'node:timers/promises';
-import type Stripe from 'stripe';
+import { z } from 'zod';
+
+const shape = z.object({ id: z.string(), type: z.string() });
 
 interface Received {
   readonly payload: string;
   readonly signature: string;
-  readonly event: Pick<Stripe.Event, 'id' | 'type'>;
+  readonly event: z.output<typeof shape>;
 }
 
 export interface Receiver {
@@ -28,7 +30,7 @@ export async function startReceiver(): Promise<Receiver> {
     request.on('data', (part: Buffer) => parts.push(part));
     request.on('end', () => {
       const payload = Buffer.concat(parts).toString('utf8');
-      const event: Received['event'] = JSON.parse(payload);
+      const event = shape.parse(JSON.parse(payload));
       received.push({ payload, signature: String(request.headers['stripe-signature']), event });
       response.writeHead(answers.get(event.type)?.shift() ?? 200).end();
     });

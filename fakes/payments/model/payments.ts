@@ -34,7 +34,7 @@ export const sessionShape = z.object({
   url: maybe,
 });
 
-export const lineItemShape = z.object({
+const lineItemShape = z.object({
   id: text,
   object: z.literal('item'),
   amount_discount: count,
@@ -173,7 +173,6 @@ export const disputeShape = z.object({
 
 export type Session = z.output<typeof sessionShape>;
 export type LineItem = z.output<typeof lineItemShape>;
-export type SessionPlan = z.output<typeof sessionPlanShape>;
 export type PaymentIntent = z.output<typeof paymentIntentShape>;
 export type Charge = z.output<typeof chargeShape>;
 export type Refund = z.output<typeof refundShape>;
