@@ -1,4 +1,5 @@
 // The frame around every page: skip link, header, the page itself, footer, notices.
+import clsx from 'clsx';
 import type { ReactNode } from 'react';
 import { useLocation } from 'react-router-dom';
 import { Notices } from '../ui/notices';
@@ -34,13 +35,15 @@ export function Layout({ account, accountKnown = true, counts = NO_COUNTS, child
 interface PageProps {
   /** Draws the wire down the left: for pages with physical units, and only those. */
   readonly wired?: boolean;
+  /** Larger text, for screens used with gloves. */
+  readonly yard?: boolean;
   readonly children: ReactNode;
 }
 
 /** The main region, with the page's measure. Every page's outermost element. */
-export function Page({ wired = false, children }: PageProps) {
+export function Page({ wired = false, yard = false, children }: PageProps) {
   return (
-    <main id={MAIN_ID} tabIndex={-1} className={wired ? 'page wired' : 'page'}>
+    <main id={MAIN_ID} tabIndex={-1} className={clsx('page', wired && 'wired', yard && 'page-yard')}>
       {children}
     </main>
   );

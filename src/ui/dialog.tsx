@@ -80,6 +80,8 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
     try {
       await onConfirm();
       onClose();
+    } catch {
+      // The dialog stays open, and the caller shows why.
     } finally {
       setBusy(false);
     }

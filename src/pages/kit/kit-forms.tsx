@@ -11,6 +11,8 @@ import { Select } from '../../ui/form/select';
 import { TextArea } from '../../ui/form/text-area';
 import { TextInput } from '../../ui/form/text-input';
 import { YesNo, type YesNoAnswer } from '../../ui/form/yes-no';
+import { Tabs } from '../../ui/tabs';
+import { PhotoButton } from '../../ui/form/photo-button';
 import { sayDone, sayStop } from '../../ui/notices';
 import { Section, Sheet } from '../../ui/sheet';
 
@@ -80,6 +82,7 @@ function Listing() {
 
 function Loose() {
   const [code, setCode] = useState('K66A4XD90');
+  const [tab, setTab] = useState('code');
   const [pan, setPan] = useState<YesNoAnswer | null>('no');
   const [bell, setBell] = useState<YesNoAnswer | null>('yes');
   return (
@@ -96,6 +99,20 @@ function Loose() {
       <TextInput label="Cannot be changed" defaultValue="Quenby" disabled />
       <YesNo legend="All nine bell ears whole" legendShown value={bell} onChange={setBell} />
       <YesNo legend="Pan on" legendShown value={pan} onChange={setPan} noCostsCents={4_000} />
+      <div className="panel">
+        <Tabs
+          label="How to find a core"
+          value={tab}
+          onChange={setTab}
+          tabs={[
+            { value: 'code', label: 'Case code', content: <p className="p-20">By what is stamped</p> },
+            { value: 'rig', label: 'My vehicle', content: <p className="p-20">By the vehicle</p> },
+          ]}
+        />
+      </div>
+      <PhotoButton onFiles={(files) => sayDone(`${files.length} photo taken`)}>
+        Shoot 3, bell face
+      </PhotoButton>
       <div className="flex flex-wrap gap-10">
         <Button onClick={() => sayDone('Shot 3 is up')}>Say done</Button>
         <Button onClick={() => sayStop('Not sent. No signal')}>Say stopped</Button>

@@ -42,15 +42,7 @@ export function Form<Input extends FieldValues, Output>(props: FormProps<Input, 
     }
   });
   return (
-    <form
-      className={className}
-      aria-label={label}
-      noValidate
-      onSubmit={(event) => {
-        form.clearErrors('root');
-        void submit(event);
-      }}
-    >
+    <form className={className} aria-label={label} noValidate onSubmit={(event) => void submit(event)}>
       <ErrorSummary
         errors={submitCount > 0 ? listErrors(errors) : []}
         stops={stops}

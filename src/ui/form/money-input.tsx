@@ -33,7 +33,6 @@ export function MoneyInput(props: MoneyInputProps) {
 
   function type(text: string) {
     setDraft(text);
-    setUnreadable(null);
     onChange(parseDollars(text));
   }
   function leave() {
