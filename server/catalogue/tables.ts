@@ -1,6 +1,7 @@
 // The catalogue: families, their variants, adapters between interfaces, and models of vehicles. Nested shapes are JSON.
 import { sql } from 'drizzle-orm';
 import {
+  boolean,
   check,
   date,
   doublePrecision,
@@ -121,4 +122,14 @@ export const vehicleModels = pgTable(
     check('vehicle_models_source', sql`${t.source} <> ''`),
     uniqueIndex('vehicle_models_name').on(t.make, t.model, t.engine, t.drive, t.yearFrom),
   ],
+);
+
+/** One row that changes with every change of the catalogue, so that each process knows when its code book is old. */
+export const catalogueVersion = pgTable(
+  'catalogue_version',
+  {
+    one: boolean('one').primaryKey().default(true),
+    version: text('version').notNull(),
+  },
+  (t) => [check('catalogue_version_one', sql`${t.one}`)],
 );
