@@ -2,7 +2,6 @@
 import { createHash } from 'node:crypto';
 import { newId } from '../../shared/kernel/ids';
 import { PHOTO_SIZES, type PhotoSize } from '../../shared/photos/contract';
-import { transaction } from '../db/transaction';
 import type { Deps } from '../deps';
 import { isRefusal, refuse, type Refusal } from '../http/refusal';
 import { processPhoto, type ProcessedPhoto } from './pipeline';
@@ -71,21 +70,14 @@ const putAll = async (deps: PhotoDeps, sha256: string, sizes: ProcessedPhoto['si
   );
 };
 
+type Facts = Pick<PhotoRow, 'storedSha256' | 'widthPx' | 'heightPx' | 'takenAt' | 'bytes'>;
+
 /** The rendered facts of these bytes: of a photo already kept, or from rendering and storing them now. */
-async function factsOf(
-  deps: PhotoDeps,
-  incoming: IncomingPhoto,
-  sha256: string,
-): Promise<
-  | (Pick<PhotoRow, 'storedSha256' | 'widthPx' | 'heightPx' | 'takenAt' | 'bytes'> & {
-      sizes: ProcessedPhoto['sizes'] | null;
-    })
-  | Refusal
-> {
+async function factsOf(deps: PhotoDeps, incoming: IncomingPhoto, sha256: string): Promise<Facts | Refusal> {
   const known = await findByHash(deps.db, sha256);
   if (known) {
     const { storedSha256, widthPx, heightPx, takenAt, bytes } = known;
-    return { storedSha256, widthPx, heightPx, takenAt, bytes, sizes: null };
+    return { storedSha256, widthPx, heightPx, takenAt, bytes };
   }
   const made = await processPhoto(incoming.bytes, incoming.timeZone);
   if (isRefusal(made)) return made;
@@ -96,7 +88,6 @@ async function factsOf(
     heightPx: made.heightPx,
     takenAt: made.takenAt,
     bytes: PHOTO_SIZES.reduce((sum, size) => sum + made.sizes[size].byteLength, 0),
-    sizes: made.sizes,
   };
 }
 
@@ -110,15 +101,17 @@ export async function storePhoto(deps: PhotoDeps, incoming: IncomingPhoto): Prom
   if (refused) return refused;
   const sha256 = sha256Of(incoming.bytes);
   const id = newId('pho', now.getTime());
-  await insertPut(deps.db, id, sha256, now);
+  // Under the lock of the hash: a sweep that is removing these objects ends first, and a later one sees this upload.
+  await deps.db.transaction(async (tx) => {
+    await lockHash(tx, sha256);
+    await insertPut(tx, id, sha256, now);
+  });
   const facts = await factsOf(deps, incoming, sha256);
   if (isRefusal(facts)) {
     await deletePut(deps.db, id);
     return facts;
   }
-  const { sizes, ...measured } = facts;
-  const row = await transaction(deps.db, async (tx) => {
-    await lockHash(tx, sha256);
+  return deps.db.transaction(async (tx) => {
     await deletePut(tx, id);
     return insertPhoto(tx, {
       id,
@@ -128,17 +121,9 @@ export async function storePhoto(deps: PhotoDeps, incoming: IncomingPhoto): Prom
       shot: incoming.shot,
       position: incoming.position ?? 0,
       sha256,
-      ...measured,
+      ...facts,
       drawn: incoming.drawn ?? false,
       createdAt: now,
     });
   });
-  if (isRefusal(row)) return row;
-  // The sweep may have taken the objects between our look and our row; from the row on it leaves them alone.
-  if (!(await deps.storage.exists(objectKey(sha256, 'large')))) {
-    const made = sizes ? { sizes } : await processPhoto(incoming.bytes, incoming.timeZone);
-    if (isRefusal(made)) return made;
-    await putAll(deps, sha256, made.sizes);
-  }
-  return row;
 }
