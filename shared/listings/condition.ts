@@ -2,6 +2,8 @@
 import { z } from 'zod';
 import { UNIT_KINDS, type UnitKind } from '../catalogue/kinds';
 
+export type { UnitKind } from '../catalogue/kinds';
+
 export const GRADES = ['A', 'B', 'C', 'D'] as const;
 export type Grade = (typeof GRADES)[number];
 

@@ -105,7 +105,6 @@ export const searchListings = endpoint({
   access: 'public',
   query: searchQuery,
   answer: searchAnswer,
-  perMinute: 300,
 });
 
 export const getListing = endpoint({
@@ -116,7 +115,6 @@ export const getListing = endpoint({
   params: idParams,
   query: z.object({ rigId: id.optional(), zip: zip.optional() }),
   answer: listingPage,
-  perMinute: 300,
 });
 
 export const createDraft = endpoint({

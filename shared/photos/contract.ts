@@ -47,5 +47,4 @@ export const getPhoto = endpoint({
   summary: 'One size of a photo as WebP: open to all for a unit on offer, otherwise for the parties only.',
   access: 'public',
   params: z.strictObject({ id, size: photoSize }),
-  perMinute: 3_000,
 });
