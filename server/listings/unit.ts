@@ -1,11 +1,9 @@
 // Which unit a listing is of: its variant and family from the catalogue, its title, and the words it's found by.
-import { eq } from 'drizzle-orm';
-import { familyName } from '../../shared/catalogue/family';
 import type { UnitKind } from '../../shared/catalogue/kinds';
 import type { ChangeBody } from '../../shared/listings/contract';
 import type { ListingPage } from '../../shared/listings/page';
-import { codeBook, readCode, type BookEntry } from '../../shared/reading/read-code';
-import { families, variants } from '../catalogue/tables';
+import { readCode } from '../../shared/reading/read-code';
+import { currentBook, findFamily, findVariant } from '../catalogue/for-others';
 import type { Tx } from '../db/client';
 import { invalid, isRefusal, type Refusal } from '../http/refusal';
 import { findDonor, type NewListing, type SellerRow } from './queries';
@@ -20,25 +18,20 @@ export interface Unit {
 }
 
 export async function unitOf(tx: Tx, variantId: string): Promise<Unit | null> {
-  const [found] = await tx
-    .select({ variant: variants, family: families })
-    .from(variants)
-    .innerJoin(families, eq(families.id, variants.familyId))
-    .where(eq(variants.id, variantId));
-  if (!found) return null;
-  const { variant, family } = found;
-  const name = familyName(family);
+  const variant = await findVariant(tx, variantId);
+  const family = variant && (await findFamily(tx, variant.familyId));
+  if (!family) return null;
   return {
     variantId: variant.id,
     variantName: variant.label,
     kind: family.kind,
     // The first mark of the variant sets it apart in a list; the page shows all of them.
-    title: [name, variant.label.split(',')[0]?.trim()].filter(Boolean).join(', '),
+    title: [family.name, variant.label.split(',')[0]?.trim()].filter(Boolean).join(', '),
     family: {
       id: family.id,
       maker: family.maker,
       designation: family.designation,
-      name,
+      name: family.name,
       control: family.control,
       forwardRatios: family.forwardRatios,
       reverseRatio: family.reverseRatio,
@@ -104,24 +97,15 @@ export async function settleUnit(
   return { columns: body.kind !== undefined && !before?.variantId ? { kind: body.kind } : {} };
 }
 
-const bookOf = async (tx: Tx, variantId?: string): Promise<BookEntry[]> => {
-  const rows = await tx
-    .select({ variant: variants, family: families })
-    .from(variants)
-    .innerJoin(families, eq(families.id, variants.familyId))
-    .where(variantId === undefined ? undefined : eq(variants.id, variantId));
-  return rows.flatMap(({ variant, family }) =>
-    codeBook([family], [{ ...variant, modelYears: { from: variant.yearFrom, to: variant.yearTo } }]),
-  );
-};
-
 async function variantByCode(tx: Tx, text: string): Promise<string | null> {
-  const { candidates, verdict } = readCode(text, await bookOf(tx));
+  const { candidates, verdict } = readCode(text, await currentBook(tx));
   return verdict === 'cannot_tell' ? null : (candidates[0]?.variantId ?? null);
 }
 
 /** The code taken apart as this variant bears it; null where it isn't one of its codes. */
 export async function readCodeOf(tx: Tx, text: string, variantId: string): Promise<ListingPage['code']> {
-  const [candidate] = readCode(text, await bookOf(tx, variantId)).candidates;
+  const book = await currentBook(tx);
+  const own = book.filter((entry) => entry.variantId === variantId);
+  const [candidate] = readCode(text, own).candidates;
   return candidate ? { text, segments: [...candidate.segments], builtOn: candidate.builtOn } : null;
 }
