@@ -4,6 +4,7 @@ import { PageHead } from '../ui/page-title';
 import { CodePlate } from '../ui/code-plate';
 import { KitForms } from './kit/kit-forms';
 import { KitLook } from './kit/kit-look';
+import { KitOrders } from './kit/kit-orders';
 import { KitPictures } from './kit/kit-pictures';
 import { CODE } from './kit/samples';
 
@@ -21,6 +22,7 @@ export function KitPage() {
       />
       <KitLook />
       <KitForms />
+      <KitOrders />
       <KitPictures />
     </Page>
   );
