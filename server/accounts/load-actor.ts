@@ -14,7 +14,7 @@ export async function loadActor(deps: Deps, userId: string): Promise<Actor | nul
       memberships: sql<Membership[]>`coalesce(
         (select json_agg(json_build_object('sellerId', m.seller_id, 'duties', m.duties) order by m.created_at, m.seller_id)
          from ${sellerMembers} m join ${sellers} s on s.id = m.seller_id
-         where m.user_id = ${users.id} and s.closed_at is null), '[]'::json)`,
+         where m.user_id = ${users}.id and s.closed_at is null), '[]'::json)`,
     })
     .from(users)
     .where(and(eq(users.id, userId), isNull(users.closedAt)));
