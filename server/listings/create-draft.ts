@@ -2,13 +2,23 @@
 import { hasDuty, type Actor } from '../../shared/accounts/actor';
 import { newId } from '../../shared/kernel/ids';
 import { newTagCode } from '../../shared/kernel/tag-code';
-import type { DraftBody } from '../../shared/listings/contract';
+import type { ChangeBody, DraftBody } from '../../shared/listings/contract';
+import { terms } from '../../shared/listings/terms';
 import { transaction } from '../db/transaction';
 import type { Deps } from '../deps';
 import { notFound, refuse, type Refusal } from '../http/refusal';
 import { changeErrors, columnsOf, derivedOf } from './facts';
-import { insertListing, loadStock, findSeller, updateListing, type Stock } from './queries';
+import { insertListing, loadStock, findSeller, updateListing, type SellerRow, type Stock } from './queries';
 import { settleUnit } from './unit';
+
+/** The seller's own terms, where the draft brings none. */
+function termsOf(seller: SellerRow): ChangeBody['terms'] {
+  const { depositCents, windowDays, schedule, returnFreight: payer, outright } = seller.terms;
+  const exchange =
+    depositCents === null ? null : { depositCents, windowDays, schedule, returnFreight: payer };
+  const parsed = terms.safeParse({ exchange, outright });
+  return parsed.success ? parsed.data : undefined;
+}
 
 export async function createDraft(deps: Deps, actor: Actor, body: DraftBody): Promise<Stock | Refusal> {
   const { sellerId, ...fields } = body;
@@ -34,7 +44,11 @@ export async function createDraft(deps: Deps, actor: Actor, body: DraftBody): Pr
       lon: seller.lon,
       createdAt: now,
       updatedAt: now,
-      ...columnsOf(fields),
+      ...columnsOf({
+        ...fields,
+        terms: fields.terms ?? termsOf(seller),
+        shipDays: fields.shipDays ?? seller.terms.shipDays,
+      }),
       ...unit.columns,
     });
     await updateListing(tx, draft, derivedOf(draft), now);

@@ -20,7 +20,7 @@ const several = <T extends z.ZodType>(item: T) =>
       const kept = [...new Set(parts.filter((part) => part !== undefined && part !== ''))];
       return kept.length === 0 ? undefined : kept;
     }, z.array(item).max(20).optional())
-    .meta({ override: { type: 'string', description: 'One value, or several with commas' } });
+    .meta({ description: 'One value or several; commas between them are understood too' });
 
 const blank = <T extends z.ZodType>(inner: T) =>
   z.preprocess((given: unknown) => (given === '' ? undefined : given), inner.optional());

@@ -83,6 +83,17 @@ export interface GradeExample {
   readonly lines: readonly ScheduleItem[];
 }
 
+/** Lines that stand for any kind of unit, as new seller accounts start with. */
+const GENERAL: Readonly<Record<string, FaultEffect>> = {
+  case_damage: 'case',
+  taken_apart: 'not_core',
+  not_a_core: 'not_core',
+};
+
+/** What the fault of a schedule line does to the grade; a line of the seller's own counts as a small part. */
+export const lineEffect = (kind: UnitKind, code: string): FaultEffect =>
+  effectOf(kind, code) ?? GENERAL[code] ?? 'small_part';
+
 const LEVELS: readonly { grade: Grade; effect: FaultEffect }[] = [
   { grade: 'B', effect: 'small_part' },
   { grade: 'C', effect: 'case' },
@@ -91,8 +102,8 @@ const LEVELS: readonly { grade: Grade; effect: FaultEffect }[] = [
 
 /**
  * What comes back of the deposit at each grade, worked from the schedule: at least one line of the grade's own kind is
- * taken (the cheapest gives the most), and at worst all lines of that kind and of the lighter ones. A line of the
- * seller's own counts as a small part. A grade without a line of its own leaves the deposit whole at best.
+ * taken (the cheapest gives the most), and at worst all lines of that kind and of the lighter ones. A grade without a
+ * line of its own leaves the deposit whole at best.
  */
 export function returnByGrade(kind: UnitKind, offer: ExchangeTerms): GradeExample[] {
   const { depositCents, schedule } = offer;
@@ -103,7 +114,7 @@ export function returnByGrade(kind: UnitKind, offer: ExchangeTerms): GradeExampl
   ];
   const lighter: ScheduleItem[] = [];
   for (const { grade, effect } of LEVELS) {
-    const own = schedule.filter((item) => (effectOf(kind, item.code) ?? 'small_part') === effect);
+    const own = schedule.filter((item) => lineEffect(kind, item.code) === effect);
     const cheapest = [...own].sort((a, b) => a.cents - b.cents).slice(0, 1);
     lighter.push(...own);
     examples.push({ grade, leastCents: back(lighter), mostCents: back(cheapest), lines: own });

@@ -5,6 +5,7 @@ import { migrate } from '../../server/db/migrate';
 pg.types.setTypeParser(pg.types.builtins.INT8, Number);
 
 export interface TestDatabase {
+  readonly url: string;
   readonly pool: pg.Pool;
   close(): Promise<void>;
 }
@@ -18,5 +19,5 @@ export async function openDatabase(): Promise<TestDatabase> {
   await admin.end();
   await migrate(`${base}/${name}`);
   const pool = new pg.Pool({ connectionString: `${base}/${name}`, max: 4 });
-  return { pool, close: () => pool.end() };
+  return { url: `${base}/${name}`, pool, close: () => pool.end() };
 }
