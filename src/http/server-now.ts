@@ -1,5 +1,6 @@
 // What time it is to the server: the demo's clock runs ahead of the browser's, and deadlines are counted by the server's.
 import { queryOptions, useQuery } from '@tanstack/react-query';
+import { useEffect, useState } from 'react';
 import { readClock } from '../../shared/system/contract';
 import { call, ProblemError } from './client';
 
@@ -23,9 +24,15 @@ export const serverLeadQuery = queryOptions({
   staleTime: (query) => (query.state.data === 0 ? Infinity : MINUTE_MS),
 });
 
-/** The server's time as an ISO 8601 instant, to the minute. */
+const thisMinute = (): number => Math.floor(Date.now() / MINUTE_MS) * MINUTE_MS;
+
+/** The server's time as an ISO 8601 instant, to the minute; it goes on while the page is open. */
 export function useServerNow(): string {
+  const [minute, setMinute] = useState(thisMinute);
   const lead = useQuery(serverLeadQuery).data ?? 0;
-  const minute = Math.floor((Date.now() + lead) / MINUTE_MS) * MINUTE_MS;
-  return new Date(minute).toISOString();
+  useEffect(() => {
+    const timer = setInterval(() => setMinute(thisMinute()), MINUTE_MS / 4);
+    return () => clearInterval(timer);
+  }, []);
+  return new Date(minute + lead).toISOString();
 }
