@@ -1,21 +1,41 @@
 // What an admin sees of accounts: sellers to look at, and the audit trail.
-import { and, asc, desc, eq, lt, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, ilike, lt, or, sql } from 'drizzle-orm';
 import { z } from 'zod';
-import { adminAudit, adminSellers, verifySeller } from '../../shared/accounts/contract';
+import { adminAudit, adminSellers, adminUsers, verifySeller } from '../../shared/accounts/admin-contract';
 import { packCursor, unpackCursor } from '../../shared/kernel/cursor';
+import { id } from '../../shared/kernel/fields';
 import { transaction } from '../db/transaction';
 import { invalid, isRefusal, notFound, type Refusal } from '../http/refusal';
 import { route, type Route } from '../http/route';
 import { recordAudit } from './for-others';
 import { presentSeller, type SellerRow } from './present';
-import { audit, sellers, users } from './tables';
+import { audit, sellerMembers, sellers, users } from './tables';
 import { memberCount } from './team';
 
-const sellerCursor = z.tuple([z.number().int(), z.iso.datetime(), z.string().max(64)]);
-const auditCursor = z.tuple([z.number().int()]);
+const sellerCursor = z.tuple([z.union([z.literal(0), z.literal(1)]), z.iso.datetime(), id]);
+const auditCursor = z.tuple([z.number().int().min(0)]);
+const userCursor = z.tuple([z.iso.datetime(), id]);
+
+/*
+ * Inside the sub-selects below the outer row is named by its table: Drizzle writes a column of a single table without
+ * it, and a bare "id" would mean the inner one.
+ */
 
 /** 0 for those nobody has looked at yet: they come first. */
 const looked = sql<number>`(${sellers.verifiedAt} is not null)::int`;
+
+/** `%` and `_` stand for themselves in what somebody looks for. */
+const escapeLike = (text: string): string => text.replaceAll(/[\\%_]/g, (mark) => `\\${mark}`);
+
+const presentPerson = (row: typeof users.$inferSelect) => ({
+  id: row.id,
+  name: row.name,
+  email: row.email,
+  isAdmin: row.isAdmin,
+  mailChecked: row.mailCheckedAt !== null,
+  createdAt: row.createdAt.toISOString(),
+  closedAt: row.closedAt?.toISOString() ?? null,
+});
 
 export const adminRoutes: readonly Route[] = [
   route(adminSellers, async (call, deps) => {
@@ -26,8 +46,8 @@ export const adminRoutes: readonly Route[] = [
       .select({
         seller: sellers,
         looked,
-        members: memberCount(sellers.id),
-        liveListings: sql<number>`(select count(*)::int from listings l where l.seller_id = ${sellers.id} and l.status = 'live')`,
+        members: memberCount(sql`sellers.id`),
+        liveListings: sql<number>`(select count(*)::int from listings l where l.seller_id = sellers.id and l.status = 'live')`,
       })
       .from(sellers)
       .where(
@@ -103,6 +123,36 @@ export const adminRoutes: readonly Route[] = [
         detail: line.detail,
       })),
       next: rows.length > query.limit && last ? packCursor([last.line.id]) : null,
+    };
+  }),
+  route(adminUsers, async (call, deps) => {
+    const { query } = call;
+    const after = query.cursor ? unpackCursor(query.cursor, userCursor) : null;
+    if (query.cursor && !after) return invalid('cursor', 'Start from the first page');
+    const part = query.q ? `%${escapeLike(query.q)}%` : null;
+    const rows = await deps.db
+      .select({
+        user: users,
+        sellers: sql<{ id: string; name: string }[]>`coalesce(
+          (select json_agg(json_build_object('id', s.id, 'name', s.name) order by s.name)
+           from ${sellerMembers} m join ${sellers} s on s.id = m.seller_id where m.user_id = users.id), '[]'::json)`,
+      })
+      .from(users)
+      .where(
+        and(
+          part ? or(ilike(users.name, part), ilike(users.email, part)) : undefined,
+          after
+            ? sql`(${users.createdAt}, ${users.id}) < (${after[0]}::timestamptz, ${after[1]})`
+            : undefined,
+        ),
+      )
+      .orderBy(desc(users.createdAt), desc(users.id))
+      .limit(query.limit + 1);
+    const shown = rows.slice(0, query.limit);
+    const last = shown.at(-1)?.user;
+    return {
+      items: shown.map((row) => ({ ...presentPerson(row.user), sellers: row.sellers })),
+      next: rows.length > query.limit && last ? packCursor([last.createdAt.toISOString(), last.id]) : null,
     };
   }),
 ];

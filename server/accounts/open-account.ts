@@ -7,30 +7,12 @@ import type { Deps } from '../deps';
 import { locateZip } from '../geo/zip';
 import { invalid, isRefusal, type Refusal } from '../http/refusal';
 import { queueMail } from '../notices/for-others';
+import { FIRST_TERMS } from './first-terms';
 import { recordAudit } from './for-others';
 import { hashPassword } from './password';
 import type { SellerRow } from './present';
-import { sellerMembers, sellers, users, type SellerTerms } from './tables';
+import { sellerMembers, sellers, users } from './tables';
 import { issueToken } from './tokens';
-
-/** A fair start that the owner changes: amounts are of the order common in the trade (common practice). */
-export const FIRST_TERMS: SellerTerms = {
-  windowDays: 45,
-  depositCents: 40_000,
-  schedule: [
-    { code: 'pan_missing', label: 'Pan missing or holed', cents: 4_000 },
-    { code: 'connector_broken', label: 'Connector or linkage broken', cents: 3_000 },
-    { code: 'converter_missing', label: 'Converter missing', cents: 8_500 },
-    { code: 'small_parts_missing', label: 'Small parts missing', cents: 5_000 },
-    { code: 'case_damage', label: 'Case damaged but usable', cents: 18_000 },
-    { code: 'taken_apart', label: 'Taken apart or in a box', cents: 25_000 },
-    { code: 'not_a_core', label: 'Not a core: wrong unit, case broken through, burnt out', cents: 40_000 },
-  ],
-  returnFreight: 'builder',
-  shipDays: 5,
-  graceDays: 3,
-  outright: true,
-};
 
 export interface NewSeller {
   readonly name: string;

@@ -1,17 +1,16 @@
 // What of a person and a seller leaves the server.
 import { asc, eq, inArray } from 'drizzle-orm';
 import { isMember, type Actor } from '../../shared/accounts/actor';
-import type { Me, seller as sellerSchema } from '../../shared/accounts/contract';
-import type { z } from 'zod';
+import type { Me } from '../../shared/accounts/contract';
+import type { Seller } from '../../shared/accounts/seller-contract';
 import type { Deps } from '../deps';
 import type { SessionSeam } from '../http/route';
 import { loadActor } from './load-actor';
 import { sellers } from './tables';
 
 export type SellerRow = typeof sellers.$inferSelect;
-export type SellerView = z.output<typeof sellerSchema>;
 
-export function presentSeller(row: SellerRow, actor: Actor | null): SellerView {
+export function presentSeller(row: SellerRow, actor: Actor | null): Seller {
   const inside = actor !== null && (isMember(actor, row.id) || actor.isAdmin);
   return {
     id: row.id,

@@ -1,17 +1,34 @@
-// Mail check, and setting a new password with a link or with the old one.
+// Links by mail: proving an address, and setting a new password.
+import { setTimeout as wait } from 'node:timers/promises';
 import { and, eq, isNull, sql } from 'drizzle-orm';
 import { transaction } from '../db/transaction';
-import type { Tx } from '../db/client';
 import type { Deps } from '../deps';
-import { invalid, type Refusal } from '../http/refusal';
+import { sharedLimiter, type Limiter } from '../http/limits';
+import { invalid, isRefusal, type Refusal } from '../http/refusal';
 import { queueMail } from '../notices/for-others';
 import { recordAudit } from './for-others';
 import { mailCheckLink } from './open-account';
-import { checkPassword, hashPassword } from './password';
+import { hashPassword } from './password';
+import { accountKey } from './sign-in';
+import { storePassword } from './store-password';
 import { users } from './tables';
 import { issueToken, useToken } from './tokens';
 
 const STALE_LINK = 'This link was used or is older than 30 minutes. Ask for a new one';
+const MAILS_PER_HOUR = 6;
+/** Longer than the work for a known address takes, so that the wait is the same for an unknown one. */
+const FORGOT_ANSWER_MS = 250;
+
+const limiters = new WeakMap<Deps, Limiter>();
+
+/** So that nobody fills a stranger's mailbox with our links. */
+function mailLimiter(deps: Deps): Limiter {
+  const known = limiters.get(deps);
+  const made =
+    known ?? sharedLimiter(deps.pool, { name: 'account_mail', points: MAILS_PER_HOUR, seconds: 3600 });
+  limiters.set(deps, made);
+  return made;
+}
 
 export async function checkMailLink(deps: Deps, token: string): Promise<{ email: string } | Refusal> {
   const now = deps.clock.now();
@@ -21,22 +38,36 @@ export async function checkMailLink(deps: Deps, token: string): Promise<{ email:
     const [user] = await tx
       .update(users)
       .set({ mailCheckedAt: now })
-      .where(eq(users.id, userId))
+      .where(and(eq(users.id, userId), isNull(users.closedAt)))
       .returning({ email: users.email });
-    return user ? { email: user.email } : invalid('token', STALE_LINK);
+    if (!user) return invalid('token', STALE_LINK);
+    await recordAudit(tx, {
+      at: now,
+      actorUserId: userId,
+      actorKind: 'user',
+      action: 'account.mail_checked',
+      objectKind: 'user',
+      objectId: userId,
+      detail: {},
+    });
+    return { email: user.email };
   });
 }
 
-export async function resendCheckLink(deps: Deps, userId: string): Promise<void> {
-  await transaction(deps.db, async (tx) => {
+export async function resendCheckLink(deps: Deps, userId: string): Promise<void | Refusal> {
+  return transaction(deps.db, async (tx): Promise<void | Refusal> => {
     const [user] = await tx.select().from(users).where(eq(users.id, userId));
-    if (user && user.mailCheckedAt === null) await mailCheckLink(deps, tx, user, deps.clock.now());
+    if (!user || user.mailCheckedAt !== null) return;
+    const braked = await mailLimiter(deps).take(`check:${accountKey(user.email)}`);
+    if (braked) return braked;
+    await mailCheckLink(deps, tx, user, deps.clock.now());
   });
 }
 
-/** Nothing in the answer or its time says whether there is such an account: the mail goes out later, from the outbox. */
-export async function mailResetLink(deps: Deps, email: string): Promise<void> {
+async function queueResetMail(deps: Deps, email: string): Promise<void> {
   const now = deps.clock.now();
+  // Counted for unknown addresses too. Refused or not, the answer says the same.
+  if (isRefusal(await mailLimiter(deps).take(`reset:${accountKey(email)}`))) return;
   await transaction(deps.db, async (tx) => {
     const [user] = await tx
       .select()
@@ -56,39 +87,9 @@ export async function mailResetLink(deps: Deps, email: string): Promise<void> {
   });
 }
 
-/** Every session of the person ends, or every other one where one is to stay. */
-async function endSessions(tx: Tx, userId: string, except: string | null): Promise<void> {
-  await tx.execute(
-    sql`delete from session where sess->>'userId' = ${userId} and sid is distinct from ${except}`,
-  );
-}
-
-async function storePassword(
-  deps: Deps,
-  tx: Tx,
-  userId: string,
-  passwordHash: string,
-  keepSid: string | null,
-) {
-  const now = deps.clock.now();
-  const [user] = await tx.update(users).set({ passwordHash }).where(eq(users.id, userId)).returning();
-  if (!user) return;
-  await endSessions(tx, userId, keepSid);
-  await queueMail(tx, {
-    to: user.email,
-    mail: { template: 'password_changed', data: { name: user.name } },
-    key: `mail:password:${userId}:${now.getTime()}`,
-    now,
-  });
-  await recordAudit(tx, {
-    at: now,
-    actorUserId: userId,
-    actorKind: 'user',
-    action: 'account.password',
-    objectKind: 'user',
-    objectId: userId,
-    detail: {},
-  });
+/** Neither the answer nor its time says whether there is such an account: the mail itself goes out later. */
+export async function mailResetLink(deps: Deps, email: string): Promise<void> {
+  await Promise.all([queueResetMail(deps, email), wait(FORGOT_ANSWER_MS)]);
 }
 
 export async function resetWithLink(deps: Deps, token: string, password: string): Promise<void | Refusal> {
@@ -103,14 +104,4 @@ export async function resetWithLink(deps: Deps, token: string, password: string)
       .where(and(eq(users.id, userId), isNull(users.mailCheckedAt)));
     await storePassword(deps, tx, userId, passwordHash, null);
   });
-}
-
-export async function changeOwnPassword(
-  deps: Deps,
-  input: { userId: string; email: string; current: string; password: string; sid: string | null },
-): Promise<void | Refusal> {
-  const matches = await checkPassword(deps, input.email, input.current);
-  if (matches !== input.userId) return invalid('current', 'This is not your password');
-  const passwordHash = await hashPassword(input.password);
-  await transaction(deps.db, (tx) => storePassword(deps, tx, input.userId, passwordHash, input.sid));
 }

@@ -14,6 +14,7 @@ import {
   uniqueIndex,
 } from 'drizzle-orm/pg-core';
 import type { Duty, SellerKind } from '../../shared/accounts/actor';
+import type { SellerTerms } from '../../shared/accounts/seller-contract';
 
 const when = (name: string) => timestamp(name, { withTimezone: true, precision: 3 });
 
@@ -31,17 +32,6 @@ export const users = pgTable(
   },
   (t) => [uniqueIndex('users_email').on(sql`lower(${t.email})`)],
 );
-
-/** Default terms that a new listing of this seller starts from. */
-export interface SellerTerms {
-  readonly windowDays: number;
-  readonly depositCents: number | null;
-  readonly schedule: { readonly code: string; readonly label: string; readonly cents: number }[];
-  readonly returnFreight: 'seller' | 'builder';
-  readonly shipDays: number;
-  readonly graceDays: number;
-  readonly outright: boolean;
-}
 
 export const sellers = pgTable(
   'sellers',
@@ -143,8 +133,5 @@ export const audit = pgTable(
     objectId: text('object_id').notNull(),
     detail: jsonb('detail').$type<Record<string, unknown>>().notNull().default({}),
   },
-  (t) => [
-    index('audit_object').on(t.objectKind, t.objectId, t.id),
-    index('audit_actor').on(t.actorUserId, t.id),
-  ],
+  (t) => [index('audit_object').on(t.objectId, t.id), index('audit_actor').on(t.actorUserId, t.id)],
 );

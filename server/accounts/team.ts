@@ -1,5 +1,5 @@
 // The members of a seller account, what each may do, and invitations. There is always an owner.
-import { and, asc, eq, gt, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, gt, isNull, sql, type SQL } from 'drizzle-orm';
 import type { Actor, Duty } from '../../shared/accounts/actor';
 import { newId } from '../../shared/kernel/ids';
 import { transaction } from '../db/transaction';
@@ -112,6 +112,30 @@ export async function invite(
   });
 }
 
+export async function cancelInvite(
+  deps: Deps,
+  actor: Actor,
+  sellerId: string,
+  inviteId: string,
+): Promise<Team | Refusal> {
+  const now = deps.clock.now();
+  return transaction(deps.db, async (tx): Promise<Team | Refusal> => {
+    const gone = await tx
+      .delete(sellerInvites)
+      .where(
+        and(
+          eq(sellerInvites.id, inviteId),
+          eq(sellerInvites.sellerId, sellerId),
+          isNull(sellerInvites.acceptedAt),
+        ),
+      )
+      .returning({ id: sellerInvites.id });
+    if (gone.length === 0) return notFound('invitation');
+    await audit(tx, actor, 'team.invite_cancel', sellerId, now, {});
+    return teamOf(tx, sellerId, now);
+  });
+}
+
 export async function accept(
   deps: Deps,
   actor: Actor,
@@ -140,10 +164,18 @@ export async function accept(
     await tx
       .insert(sellerMembers)
       .values({ sellerId: seller.id, userId: actor.userId, duties: found.duties, createdAt: now })
+      // An older invitation only ever adds: it must not take the last owner's duty away.
       .onConflictDoUpdate({
         target: [sellerMembers.sellerId, sellerMembers.userId],
-        set: { duties: found.duties },
+        set: {
+          duties: sql`(select array_agg(distinct duty) from unnest(seller_members.duties || excluded.duties) duty)`,
+        },
       });
+    // The link went to this address, so whoever opened it holds the mailbox.
+    await tx
+      .update(users)
+      .set({ mailCheckedAt: now })
+      .where(and(eq(users.id, actor.userId), isNull(users.mailCheckedAt)));
     await audit(tx, actor, 'team.join', seller.id, now, { duties: found.duties });
     return { sellerId: seller.id, sellerName: seller.name };
   });
@@ -190,5 +222,5 @@ export async function changeMember(
   });
 }
 
-export const memberCount = (sellerId: unknown) =>
+export const memberCount = (sellerId: SQL) =>
   sql<number>`(select count(*)::int from seller_members m where m.seller_id = ${sellerId})`;

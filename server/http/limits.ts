@@ -6,8 +6,9 @@ import { refuse, type Refusal } from './refusal';
 export interface Limiter {
   /** Takes a point. @returns a refusal once there are none left */
   take(key: string): Promise<Refusal | null>;
-  /** Is there a point left? Takes none. */
-  check(key: string): Promise<Refusal | null>;
+  /** Returns one point: the try turned out well. */
+  giveBack(key: string): Promise<void>;
+  /** All points are there again. */
   forget(key: string): Promise<void>;
 }
 
@@ -22,7 +23,7 @@ const tooMany = (waitMs: number): Refusal =>
     retryAfterSeconds: Math.max(1, waitMs / 1000),
   });
 
-function limiterOf(limiter: RateLimiterPostgres | RateLimiterMemory, rule: LimitRule): Limiter {
+function limiterOf(limiter: RateLimiterPostgres | RateLimiterMemory): Limiter {
   return {
     take: async (key) => {
       try {
@@ -33,9 +34,8 @@ function limiterOf(limiter: RateLimiterPostgres | RateLimiterMemory, rule: Limit
         throw error;
       }
     },
-    check: async (key) => {
-      const state = await limiter.get(key);
-      return state !== null && state.consumedPoints >= rule.points ? tooMany(state.msBeforeNext) : null;
+    giveBack: async (key) => {
+      await limiter.reward(key, 1);
     },
     forget: async (key) => {
       await limiter.delete(key);
@@ -56,12 +56,8 @@ export const sharedLimiter = (pool: Pool, rule: LimitRule): Limiter =>
       points: rule.points,
       duration: rule.seconds,
     }),
-    rule,
   );
 
 /** Of this process alone: for reads, where a look-up would cost more than the read. */
 export const localLimiter = (rule: LimitRule): Limiter =>
-  limiterOf(
-    new RateLimiterMemory({ keyPrefix: rule.name, points: rule.points, duration: rule.seconds }),
-    rule,
-  );
+  limiterOf(new RateLimiterMemory({ keyPrefix: rule.name, points: rule.points, duration: rule.seconds }));

@@ -20,6 +20,8 @@ declare module 'express-session' {
 
 const IDLE_MS = 12 * 3_600_000;
 const ABSOLUTE_MS = 14 * 86_400_000;
+const TOUCH_EVERY_MS = 60_000;
+const REMEMBERED_TOUCHES = 10_000;
 const SAFE: ReadonlySet<string> = new Set(['GET', 'HEAD', 'OPTIONS']);
 const NONCE = /^[A-Za-z0-9_-]{22,64}$/;
 
@@ -42,6 +44,33 @@ function cookieOf(req: Request, name: string): string | null {
   return null;
 }
 
+/**
+ * The end of a session moves at most once a minute: a page of photos would otherwise write one row dozens of times.
+ * It is only ever an update, so a session that was ended elsewhere meanwhile stays ended.
+ */
+function touchSeldom(store: session.Store): session.Store {
+  const touch = store.touch?.bind(store);
+  const touchedAtMs = new Map<string, number>();
+  store.touch = (sid, data, done) => {
+    const now = Date.now();
+    if (!touch || now - (touchedAtMs.get(sid) ?? 0) < TOUCH_EVERY_MS) return done?.();
+    if (touchedAtMs.size >= REMEMBERED_TOUCHES) touchedAtMs.clear();
+    touchedAtMs.set(sid, now);
+    touch(sid, data, done);
+  };
+  return store;
+}
+
+/** Whatever a shared cache may keep must not carry somebody's session cookie. Stands before the session itself. */
+const keepCookiesOutOfCaches: RequestHandler = (_req, res, next) => {
+  const writeHead = res.writeHead.bind(res) as (...args: unknown[]) => Response;
+  res.writeHead = ((...args: unknown[]) => {
+    if (/\bpublic\b/.test(String(res.getHeader('cache-control') ?? ''))) res.removeHeader('set-cookie');
+    return writeHead(...args);
+  }) as Response['writeHead'];
+  next();
+};
+
 export function sessionLayer(deps: Deps): RequestHandler[] {
   const Store = connectPg(session);
   const name = sessionCookie(deps);
@@ -52,19 +81,22 @@ export function sessionLayer(deps: Deps): RequestHandler[] {
     saveUninitialized: false,
     rolling: true,
     cookie: { httpOnly: true, sameSite: 'lax', secure: production(deps), path: '/', maxAge: IDLE_MS },
-    store: new Store({
-      pool: deps.pool,
-      tableName: 'session',
-      createTableIfMissing: false,
-      pruneSessionInterval: false,
-    }),
+    store: touchSeldom(
+      new Store({
+        pool: deps.pool,
+        tableName: 'session',
+        createTableIfMissing: false,
+        pruneSessionInterval: false,
+      }),
+    ),
   });
   const endOld: RequestHandler = (req, _res, next) => {
     const endsAtMs = req.session?.endsAtMs;
     if (endsAtMs === undefined || endsAtMs > Date.now()) next();
-    else req.session.destroy(next);
+    // An empty one in its place, so that this very request may sign in again.
+    else req.session.regenerate(next);
   };
-  return [sessions, endOld];
+  return [keepCookiesOutOfCaches, sessions, endOld];
 }
 
 const sign = (deps: Deps, text: string): string =>

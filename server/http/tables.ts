@@ -1,4 +1,5 @@
 // Tables of the HTTP layer: stored answers for Idempotency-Key, sessions, rate limits.
+import { sql } from 'drizzle-orm';
 import {
   bigint,
   index,
@@ -33,7 +34,7 @@ export const sessions = pgTable(
     sess: json('sess').notNull(),
     expire: timestamp('expire', { precision: 6 }).notNull(),
   },
-  (t) => [index('session_expire').on(t.expire)],
+  (t) => [index('session_expire').on(t.expire), index('session_user').on(sql`(${t.sess} ->> 'userId')`)],
 );
 
 /** The shape rate-limiter-flexible expects. */
