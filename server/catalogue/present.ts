@@ -87,6 +87,7 @@ export const presentVehicle = (row: typeof vehicleModels.$inferSelect): VehicleM
   engine: row.engine,
   drive: row.drive,
   joints: row.joints,
+  unitIds: row.unitIds,
   axleRatio: row.axleRatio,
   tyre: row.tyre,
   source: row.source,

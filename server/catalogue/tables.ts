@@ -112,6 +112,7 @@ export const vehicleModels = pgTable(
     engine: text('engine').notNull(),
     drive: text('drive').$type<VehicleModel['drive']>().notNull(),
     joints: jsonb('joints').$type<VehicleModel['joints']>().notNull(),
+    unitIds: jsonb('unit_ids').$type<string[]>().notNull(),
     axleRatio: doublePrecision('axle_ratio').notNull(),
     tyre: text('tyre').notNull(),
     source: text('source').notNull(),

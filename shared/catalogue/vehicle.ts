@@ -21,6 +21,8 @@ export const vehicleModel = z
       transfer_case: interfaces.optional(),
       axle: interfaces.optional(),
     }),
+    /** Variants that the plant fitted. */
+    unitIds: z.array(id),
     axleRatio: z.number().min(2).max(8),
     tyre: line(24),
     source: paragraph(200).min(1),

@@ -1,0 +1,1 @@
+ALTER TABLE "vehicle_models" ADD COLUMN "unit_ids" jsonb NOT NULL;
