@@ -23,6 +23,8 @@ export const dayOfYear = (date: string): number =>
 export const dayAndMonth = (date: string): string =>
   `${Number(date.slice(8, 10))} ${MONTHS[Number(date.slice(5, 7)) - 1] ?? ''}`;
 
+const dayText = (day: number): string => String(day).padStart(3, '0');
+
 /** What a segment shows of a date; null for a segment that shows none. */
 export function dateText(segment: Segment, date: string): string | null {
   switch (segment.kind) {
@@ -31,7 +33,7 @@ export function dateText(segment: Segment, date: string): string | null {
     case 'year_two':
       return date.slice(2, 4);
     case 'day_of_year':
-      return String(dayOfYear(date)).padStart(3, '0');
+      return dayText(dayOfYear(date));
     default:
       return null;
   }
@@ -52,20 +54,26 @@ const showsDate = (segment: Segment): boolean => dateText(segment, '2000-01-01')
 /** Does the code show the build date at all? */
 export const hasDate = (pattern: CodePattern): boolean => pattern.segments.some(showsDate);
 
+const DAYS = Array.from({ length: 366 }, (_, index) => index + 1);
+
+/** Days of the year that the typed pieces leave open. */
+function openDays(pieces: readonly Piece[]): number[] {
+  const typed = pieces.filter(({ segment }) => segment.kind === 'day_of_year').map((piece) => piece.typed);
+  return DAYS.filter((day) => typed.every((text) => couldBe(text, dayText(day))));
+}
+
 /** Every day of the span that the typed pieces could show, in order. */
 export function possibleDates(pieces: readonly Piece[], span: Span): string[] {
-  const dated = pieces.filter(({ segment }) => showsDate(segment));
-  const yearPieces = dated.filter(({ segment }) => segment.kind !== 'day_of_year');
+  const yearPieces = pieces.filter(
+    ({ segment }) => segment.kind === 'year_digit' || segment.kind === 'year_two',
+  );
+  const days = openDays(pieces);
   const found: string[] = [];
   for (let year = yearOf(span.builtFrom); year <= yearOf(span.builtTo); year += 1) {
     const first = dateOf(year, 1);
     if (!yearPieces.every(({ segment, typed }) => couldBe(typed, dateText(segment, first) ?? ''))) continue;
-    for (let day = 1; day <= daysIn(year); day += 1) {
-      const date = dateOf(year, day);
-      if (date < span.builtFrom || date > span.builtTo) continue;
-      if (dated.every(({ segment, typed }) => couldBe(typed, dateText(segment, date) ?? '')))
-        found.push(date);
-    }
+    const dates = days.filter((day) => day <= daysIn(year)).map((day) => dateOf(year, day));
+    found.push(...dates.filter((date) => date >= span.builtFrom && date <= span.builtTo));
   }
   return found;
 }
