@@ -14,7 +14,7 @@ import { makeDeps } from '../../server/make-deps';
 import { photoRoutes } from '../../server/photos/routes';
 import type { Deps } from '../../server/deps';
 import { checklist } from '../../shared/listings/condition';
-import { openDatabase } from './database';
+import { openDatabase } from '../support/database';
 
 const KEYS = { accessKeyId: 'TESTKEY', secretAccessKey: 'test/secret+key' };
 const BUCKET = 'listing-tests';

@@ -5,7 +5,7 @@ import { countStatement } from '../../server/listings/facets';
 import { orderOf, pageStatement, type Statement } from '../../server/listings/search';
 import type { Mode, Place } from '../../server/listings/search-cursor';
 import { searchQuery } from '../../shared/listings/card';
-import { openDatabase, type TestDatabase } from './database';
+import { openDatabase, type TestDatabase } from '../support/database';
 import { seedListings } from './seeded';
 
 let database: TestDatabase;

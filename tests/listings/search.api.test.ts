@@ -4,7 +4,7 @@ import { locateZip } from '../../server/geo/zip';
 import { isRefusal } from '../../server/http/refusal';
 import { runSearch } from '../../server/listings/run-search';
 import { searchQuery, type SearchAnswer } from '../../shared/listings/card';
-import { openDatabase, type TestDatabase } from './database';
+import { openDatabase, type TestDatabase } from '../support/database';
 import { bruteForce, type Question, type Row } from './oracle';
 import { insertListing, random, seedListings, type Seeded } from './seeded';
 

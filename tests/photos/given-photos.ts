@@ -4,7 +4,7 @@ import { drizzle } from 'drizzle-orm/node-postgres';
 import { startStorageFake } from '../../fakes/storage/start';
 import { createStorageGateway } from '../../server/gateways/storage';
 import type { PhotoDeps } from '../../server/photos/store-photo';
-import { openDatabase } from '../listings/database';
+import { openDatabase } from '../support/database';
 
 const KEYS = { accessKeyId: 'TESTKEY', secretAccessKey: 'test/secret+key' };
 const BUCKET = 'photo-tests';
