@@ -93,7 +93,9 @@ export function createApp(deps: Deps, options: { clientFolder?: string } = {}): 
     res.json(document);
   });
   mount(app, routes, deps, createSeams(deps));
-  app.use('/api', (req, res) => sendProblem(req, res, refuse('not_found', 'There is nothing at this address.')));
+  app.use('/api', (req: Request, res: Response) =>
+    sendProblem(req, res, refuse('not_found', 'There is nothing at this address.')),
+  );
   if (options.clientFolder) serveClient(app, options.clientFolder);
   app.use(errorHandler);
   return app;

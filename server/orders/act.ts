@@ -39,7 +39,7 @@ export interface ActInput {
 const effectKey = (order: OrderRow, effect: Effect, paymentId: string | null): string =>
   `${effect.kind}:${order.id}:${effect.meaning}:${paymentId ?? 'unpaid'}`;
 
-async function writeMoney(deps: Deps, tx: Tx, order: OrderRow, decision: Decision, now: Date): Promise<void> {
+async function writeMoney(tx: Tx, order: OrderRow, decision: Decision, now: Date): Promise<void> {
   for (const entry of decision.entries) {
     const key = `${order.id}:v${order.version}:${entry.event}`;
     await postEntry(tx, { orderId: order.id, sellerId: order.sellerId, key, entry, now });
@@ -152,7 +152,7 @@ export async function actOnLocked(
   if (!order) return refuse('stale_version', 'Somebody changed this order meanwhile. Look at it again.');
   if (!(await writeListing(tx, order, decision, now)))
     return refuse('lost_race', 'The unit is no longer on sale.');
-  await writeMoney(deps, tx, order, decision, now);
+  await writeMoney(tx, order, decision, now);
   await stopClocks(tx, order.id, decision.stops, now);
   await startClocks(deps, tx, order.id, decision.starts);
   await writeCase(tx, order, decision, input, now);

@@ -12,6 +12,7 @@ import { photoUrls } from '../photos/for-others';
 import type { OrderRow } from './load';
 import * as queries from './queries';
 import { documentsOf } from './papers';
+import { presentOrderPhoto } from './present-photo';
 import { rolesOf, sideOf, type Side } from './roles';
 
 const iso = (date: Date | null): string | null => date?.toISOString() ?? null;
@@ -182,22 +183,6 @@ function presentOutbound(order: OrderRow, side: Side): Order['outbound'] {
   };
 }
 
-type PhotoOfOrder = Awaited<ReturnType<typeof queries.orderPhotosOf>>[number]['photo'];
-
-export function presentOrderPhoto(photo: PhotoOfOrder, order: OrderRow): Order['photos'][number] {
-  const urls = photoUrls(photo.id);
-  return {
-    id: photo.id,
-    purpose: photo.purpose,
-    shot: photo.shot,
-    url: urls.large,
-    thumbUrl: urls.small,
-    takenAt: iso(photo.takenAt),
-    addedAt: photo.createdAt.toISOString(),
-    by: photo.ownerUserId === order.builderId ? 'builder' : 'seller',
-  };
-}
-
 export async function presentOrder(tx: Tx, head: queries.OrderHead, actor: Actor): Promise<Order> {
   const { order } = head;
   const side = sideOf(actor, order) ?? 'admin';
@@ -223,7 +208,7 @@ export async function presentOrder(tx: Tx, head: queries.OrderHead, actor: Actor
     zone: order.zone,
     frozen: order.frozen,
     checkoutUrl: side === 'builder' && order.outbound === 'awaiting_payment' ? order.checkoutUrl : null,
-    photos: photos.map(({ photo }) => presentOrderPhoto(photo, order)),
+    photos: photos.flatMap(({ photo }) => presentOrderPhoto(photo, order) ?? []),
     listingPhotos: listingPhotos.map((one) => ({
       shot: one.shot,
       url: photoUrls(one.id).large,

@@ -17,7 +17,8 @@ import { publicRoute, route, type Route } from '../http/route';
 import * as addPhoto from './add-photo';
 import { openCheckout } from './checkout';
 import { findTag } from './find-tag';
-import { presentHeads, presentOrder, presentOrderPhoto } from './present';
+import { presentHeads, presentOrder } from './present';
+import { presentOrderPhoto } from './present-photo';
 import { findHead, listHeads, orderPhotosOf } from './queries';
 import { reserveUnit } from './reserve';
 import { sideOf } from './roles';
@@ -107,7 +108,8 @@ const writing: readonly Route[] = [
       file: call.file,
       photosNow,
     });
-    return isRefusal(result) ? result : presentOrderPhoto(result.photo, result.order);
+    if (isRefusal(result)) return result;
+    return presentOrderPhoto(result.photo, result.order) ?? notFound('photo');
   }),
 ];
 

@@ -15,7 +15,7 @@ import {
   uniqueIndex,
 } from 'drizzle-orm/pg-core';
 import type { ClockName } from '../../shared/orders/clocks';
-import type { CoreState, OutboundState } from '../../shared/orders/states';
+import type { CoreState, OutboundState, Who } from '../../shared/orders/states';
 import type { Deduction, ScheduleItem } from '../../shared/orders/settlement';
 import { sellers, users } from '../accounts/tables';
 import { listings } from '../listings/tables';
@@ -165,7 +165,7 @@ export const timeline = pgTable(
       .references(() => orders.id),
     at: when('at').notNull(),
     action: text('action').notNull(),
-    by: text('by').notNull(),
+    by: text('by').$type<Who>().notNull(),
     actorUserId: text('actor_user_id').references(() => users.id),
     note: text('note'),
     log: text('log').notNull(),

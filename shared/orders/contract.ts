@@ -228,7 +228,7 @@ export const orderDocument = endpoint({
   }),
 });
 
-const actionEndpoint = <A extends PersonAction>(action: A) =>
+const actionEndpoint = <B extends z.ZodType>(action: PersonAction, body: B) =>
   endpoint({
     method: 'POST',
     path: `/api/orders/:id/actions/${action}`,
@@ -236,28 +236,28 @@ const actionEndpoint = <A extends PersonAction>(action: A) =>
     access: 'party',
     idempotent: true,
     params: idParams,
-    body: ACTION_INPUT[action],
+    body,
     answer: order,
   });
 
 /** One endpoint per action a person may take, so that each has its own body in the OpenAPI document. */
 export const actionEndpoints = {
-  abandon: actionEndpoint('abandon'),
-  cancel: actionEndpoint('cancel'),
-  pack: actionEndpoint('pack'),
-  hand_over: actionEndpoint('hand_over'),
-  deliver: actionEndpoint('deliver'),
-  accept: actionEndpoint('accept'),
-  refuse: actionEndpoint('refuse'),
-  allow_other_core: actionEndpoint('allow_other_core'),
-  book_return: actionEndpoint('book_return'),
-  send: actionEndpoint('send'),
-  extend: actionEndpoint('extend'),
-  keep_unit: actionEndpoint('keep_unit'),
-  receive: actionEndpoint('receive'),
-  grade: actionEndpoint('grade'),
-  agree: actionEndpoint('agree'),
-  contest: actionEndpoint('contest'),
+  abandon: actionEndpoint('abandon', ACTION_INPUT.abandon),
+  cancel: actionEndpoint('cancel', ACTION_INPUT.cancel),
+  pack: actionEndpoint('pack', ACTION_INPUT.pack),
+  hand_over: actionEndpoint('hand_over', ACTION_INPUT.hand_over),
+  deliver: actionEndpoint('deliver', ACTION_INPUT.deliver),
+  accept: actionEndpoint('accept', ACTION_INPUT.accept),
+  refuse: actionEndpoint('refuse', ACTION_INPUT.refuse),
+  allow_other_core: actionEndpoint('allow_other_core', ACTION_INPUT.allow_other_core),
+  book_return: actionEndpoint('book_return', ACTION_INPUT.book_return),
+  send: actionEndpoint('send', ACTION_INPUT.send),
+  extend: actionEndpoint('extend', ACTION_INPUT.extend),
+  keep_unit: actionEndpoint('keep_unit', ACTION_INPUT.keep_unit),
+  receive: actionEndpoint('receive', ACTION_INPUT.receive),
+  grade: actionEndpoint('grade', ACTION_INPUT.grade),
+  agree: actionEndpoint('agree', ACTION_INPUT.agree),
+  contest: actionEndpoint('contest', ACTION_INPUT.contest),
 } as const satisfies Record<PersonAction, unknown>;
 
 export { PERSON_ACTIONS };
