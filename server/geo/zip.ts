@@ -32,6 +32,11 @@ const ZONES: Readonly<Record<string, string>> = {
   PR: 'America/Puerto_Rico',
   VI: 'America/St_Thomas',
   GU: 'Pacific/Guam',
+  AS: 'Pacific/Pago_Pago',
+  MP: 'Pacific/Saipan',
+  PW: 'Pacific/Palau',
+  FM: 'Pacific/Pohnpei',
+  MH: 'Pacific/Majuro',
 };
 
 /** Parts of a state that keep another zone, by the first three digits (from memory). */
@@ -55,7 +60,6 @@ const ZONES_BY_PREFIX: Readonly<Record<string, string>> = {
   '477': CENTRAL,
   '577': MOUNTAIN,
   '586': MOUNTAIN,
-  '691': MOUNTAIN,
   '693': MOUNTAIN,
   '798': MOUNTAIN,
   '799': MOUNTAIN,
@@ -66,32 +70,30 @@ const ZONES_BY_PREFIX: Readonly<Record<string, string>> = {
 
 const FIVE_DIGITS = /^\d{5}$/;
 
-/** Codes of bases abroad stand in the data without a place, or with the sign of the longitude lost. */
-const hasPlace = (lat: number, lon: number): boolean => (lat !== 0 || lon !== 0) && lon < 0;
+/** Mail to the forces: a code is a unit, not a place, and many rows stand at 0, 0. */
+const FORCES: readonly string[] = ['AA', 'AE', 'AP'];
+const WEST_PACIFIC: readonly string[] = ['GU', 'MP', 'PW', 'FM', 'MH'];
 
-function byPrefix(zip: string): Place | null {
-  const near = Array.from({ length: 100 }, (_, index) => zip.slice(0, 3) + String(index).padStart(2, '0'))
-    .map((code) => zipcodes.lookup(code))
-    .filter((found) => found !== undefined && found !== null)
-    .filter((found) => hasPlace(found.latitude, found.longitude));
-  if (near.length === 0) return null;
-  const mean = (pick: (found: (typeof near)[number]) => number): number =>
-    near.reduce((sum, found) => sum + pick(found), 0) / near.length;
-  return { lat: mean((found) => found.latitude), lon: mean((found) => found.longitude) };
-}
+/** Some rows have lost the sign of a western longitude. */
+const longitudeOf = (state: string, longitude: number): number =>
+  WEST_PACIFIC.includes(state) ? longitude : -Math.abs(longitude);
 
 /**
  * Looks a ZIP code up.
- * @returns null where there is no such code, or nobody knows where it is
+ * @returns null where there is no such code, or it is no place on the ground (mail to the forces)
  */
 export function locateZip(zip: string): ZipPlace | null {
   if (!FIVE_DIGITS.test(zip)) return null;
   const found = zipcodes.lookup(zip);
-  if (!found) return null;
-  const place = hasPlace(found.latitude, found.longitude)
-    ? { lat: found.latitude, lon: found.longitude }
-    : byPrefix(zip);
+  if (!found || FORCES.includes(found.state)) return null;
   const timeZone = ZONES_BY_PREFIX[zip.slice(0, 3)] ?? ZONES[found.state];
-  if (!place || !timeZone) return null;
-  return { ...place, zip, city: found.city, state: found.state, timeZone };
+  if (!timeZone) return null;
+  return {
+    lat: found.latitude,
+    lon: longitudeOf(found.state, found.longitude),
+    zip,
+    city: found.city,
+    state: found.state,
+    timeZone,
+  };
 }
