@@ -6,6 +6,7 @@ import { Guard, type Needs } from './pages/guard';
 import { NotFoundPage } from './pages/not-found-page';
 import { RootLayout } from './pages/root-layout';
 import { WaitingPage } from './pages/waiting-page';
+import { paths } from './paths';
 
 type LoadPage = () => Promise<ComponentType>;
 
@@ -30,7 +31,38 @@ const page = (pattern: string, load: LoadPage, needs?: Needs): RouteObject => ({
  * One line for each page:
  * `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),`
  */
-const pages: RouteObject[] = [];
+const pages: RouteObject[] = [
+  page(paths.tag.pattern, () => import('./pages/tag-page').then((m) => m.TagPage)),
+  page(paths.orders.pattern, () => import('./pages/orders-page').then((m) => m.OrdersPage), 'signed_in'),
+  page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),
+  page(
+    paths.checkoutDone.pattern,
+    () => import('./pages/checkout-done-page').then((m) => m.CheckoutDonePage),
+    'signed_in',
+  ),
+  page(
+    paths.bookReturn.pattern,
+    () => import('./pages/book-return-page').then((m) => m.BookReturnPage),
+    'signed_in',
+  ),
+  page(paths.yard.pattern, () => import('./pages/yard-today-page').then((m) => m.YardTodayPage), 'member'),
+  page(
+    paths.yardOrders.pattern,
+    () => import('./pages/yard-orders-page').then((m) => m.YardOrdersPage),
+    'member',
+  ),
+  page(
+    paths.receiving.pattern,
+    () => import('./pages/receiving-page').then((m) => m.ReceivingPage),
+    'member',
+  ),
+  page(
+    paths.receive.pattern,
+    () => import('./pages/receive-desk-page').then((m) => m.ReceiveDeskPage),
+    'member',
+  ),
+  page(paths.payouts.pattern, () => import('./pages/payouts-page').then((m) => m.PayoutsPage), 'member'),
+];
 
 if (import.meta.env.DEV) {
   pages.push(page('/kit', () => import('./pages/kit-page').then((m) => m.KitPage)));

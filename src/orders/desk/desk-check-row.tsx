@@ -5,7 +5,7 @@ import { useRef } from 'react';
 import { formatCents } from '../../../shared/kernel/money';
 import { Icon } from '../../ui/icon';
 import { YesNo } from '../../ui/form/yes-no';
-import { PHOTO_TYPES } from '../photos/photo-pick';
+import { PHOTO_TYPES } from '../photos/photo-types';
 import type { OrderPhoto } from '../photos/use-photo-uploads';
 import type { DeskAnswer, DeskCheck } from '../view/desk-checks';
 

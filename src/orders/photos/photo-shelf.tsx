@@ -1,12 +1,12 @@
 // Photos of one purpose on an order: what is there, what is still needed, and the button to take more.
-import { useId, useState } from 'react';
+import { useState } from 'react';
 import type { Order } from '../../../shared/orders/contract';
 import type { PhotoPurpose } from '../../../shared/orders/states';
 import { ErrorMessage, fieldId } from '../../ui/form/field';
+import { PhotoButton } from '../../ui/form/photo-button';
 import { PhotoBox } from '../../ui/photo-box';
 import { ShotTile } from '../../ui/shot-tile';
 import { PendingPhotos } from './pending-photos';
-import { PhotoPick } from './photo-pick';
 import { photosFor, toBoxPhoto } from './order-photos';
 import { usePhotoUploads } from './use-photo-uploads';
 
@@ -27,7 +27,6 @@ const countWords = (have: number, needed: number): string =>
 
 export function PhotoShelf(props: PhotoShelfProps) {
   const { order, purpose, title, hint, needed, error, name = 'photos', yard = false } = props;
-  const hintId = useId();
   const [open, setOpen] = useState<number | null>(null);
   const uploads = usePhotoUploads(order.id, purpose);
   const photos = photosFor(order, purpose);
@@ -41,9 +40,7 @@ export function PhotoShelf(props: PhotoShelfProps) {
           {countWords(photos.length, needed)}
         </span>
       </div>
-      <span className="f-hint" id={hintId}>
-        {hint}
-      </span>
+      <span className="f-hint">{hint}</span>
       {photos.length > 0 && (
         <ul className="grid grid-cols-3 gap-6">
           {photos.map((photo, index) => (
@@ -60,15 +57,14 @@ export function PhotoShelf(props: PhotoShelfProps) {
         </ul>
       )}
       <PendingPhotos uploads={uploads} />
-      <PhotoPick
-        several
+      <PhotoButton
+        multiple
         size={yard ? 'yard' : 'normal'}
         full
-        describedBy={hintId}
         onFiles={(files) => uploads.add(files, null)}
       >
         {photos.length === 0 ? 'Take a photo' : 'Take another'}
-      </PhotoPick>
+      </PhotoButton>
       {error && <ErrorMessage id={`${fieldId(name)}-error`}>{error}</ErrorMessage>}
       <PhotoBox photos={photos.map((one) => toBoxPhoto(order, one))} index={open} onIndex={setOpen} />
     </div>

@@ -6,7 +6,7 @@ import { ShotTile } from '../../ui/shot-tile';
 import type { ReturnShot } from '../return-shots';
 import { newestOf, photosFor } from './order-photos';
 import { PendingPhotos } from './pending-photos';
-import { PHOTO_TYPES } from './photo-pick';
+import { PHOTO_TYPES } from './photo-types';
 import { usePhotoUploads } from './use-photo-uploads';
 
 interface ShotShelfProps {
