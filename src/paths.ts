@@ -61,6 +61,7 @@ export const paths = {
   verify: path('/verify/:token'),
   forgot: path('/forgot'),
   reset: path('/reset/:token'),
+  invite: path('/invite/:token'),
   account: path('/account'),
 
   orders: path('/orders'),

@@ -32,6 +32,18 @@ const page = (pattern: string, load: LoadPage, needs?: Needs): RouteObject => ({
  * `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),`
  */
 const pages: RouteObject[] = [
+  page(paths.signIn.pattern, () => import('./pages/sign-in-page').then((m) => m.SignInPage)),
+  page(paths.signUp.pattern, () => import('./pages/sign-up-page').then((m) => m.SignUpPage)),
+  page(
+    paths.checkMail.pattern,
+    () => import('./pages/check-mail-page').then((m) => m.CheckMailPage),
+    'signed_in',
+  ),
+  page(paths.verify.pattern, () => import('./pages/verify-page').then((m) => m.VerifyPage)),
+  page(paths.forgot.pattern, () => import('./pages/forgot-page').then((m) => m.ForgotPage)),
+  page(paths.reset.pattern, () => import('./pages/reset-page').then((m) => m.ResetPage)),
+  page(paths.invite.pattern, () => import('./pages/invite-page').then((m) => m.InvitePage), 'signed_in'),
+  page(paths.account.pattern, () => import('./pages/account-page').then((m) => m.AccountPage), 'signed_in'),
   page(paths.tag.pattern, () => import('./pages/tag-page').then((m) => m.TagPage)),
   page(paths.orders.pattern, () => import('./pages/orders-page').then((m) => m.OrdersPage), 'signed_in'),
   page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),
@@ -62,6 +74,8 @@ const pages: RouteObject[] = [
     'member',
   ),
   page(paths.payouts.pattern, () => import('./pages/payouts-page').then((m) => m.PayoutsPage), 'member'),
+  page(paths.team.pattern, () => import('./pages/team-page').then((m) => m.TeamPage), 'member'),
+  page(paths.terms.pattern, () => import('./pages/terms-page').then((m) => m.TermsPage), 'member'),
 ];
 
 if (import.meta.env.DEV) {

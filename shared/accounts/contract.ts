@@ -30,25 +30,33 @@ export const getMe = endpoint({
   answer: me,
 });
 
+export const signUpBody = z
+  .strictObject({
+    name: line(100),
+    email,
+    password: newPassword,
+    seller: sellerIdentity.optional(),
+  })
+  .refine((input) => input.password.toLowerCase() !== input.email.toLowerCase(), {
+    path: ['password'],
+    message: 'Do not use your mail address as the password',
+  });
+
 export const signUp = endpoint({
   method: 'POST',
   path: '/api/auth/sign-up',
   summary: 'Open an account, with a seller account if wished',
   access: 'public',
   perMinute: 20,
-  body: z
-    .strictObject({
-      name: line(100),
-      email,
-      password: newPassword,
-      seller: sellerIdentity.optional(),
-    })
-    .refine((input) => input.password.toLowerCase() !== input.email.toLowerCase(), {
-      path: ['password'],
-      message: 'Do not use your mail address as the password',
-    }),
+  body: signUpBody,
   answer: me,
   status: 201,
+});
+
+export const signInBody = z.strictObject({
+  email: z.string().trim().min(1, 'Type your mail address').pipe(email),
+  password: currentPassword,
+  code: z.string().trim().max(20).optional(),
 });
 
 export const signIn = endpoint({
@@ -56,11 +64,7 @@ export const signIn = endpoint({
   path: '/api/auth/sign-in',
   summary: 'Sign in',
   access: 'public',
-  body: z.strictObject({
-    email: z.string().trim().min(1, 'Type your mail address').pipe(email),
-    password: currentPassword,
-    code: z.string().trim().max(20).optional(),
-  }),
+  body: signInBody,
   answer: me,
 });
 
@@ -89,13 +93,15 @@ export const resendCheck = endpoint({
   perMinute: 5,
 });
 
+export const forgotBody = z.strictObject({ email });
+
 export const forgot = endpoint({
   method: 'POST',
   path: '/api/auth/forgot',
   summary: 'Mail a link to set a new password; the same answer whether or not there is such an account',
   access: 'public',
   perMinute: 10,
-  body: z.strictObject({ email }),
+  body: forgotBody,
 });
 
 export const resetPassword = endpoint({
@@ -107,24 +113,30 @@ export const resetPassword = endpoint({
   body: z.strictObject({ token: linkToken, password: newPassword }),
 });
 
+export const passwordChange = z.strictObject({ current: currentPassword, password: newPassword });
+
 export const changePassword = endpoint({
   method: 'POST',
   path: '/api/account/password',
   summary: 'Change the password; every other session ends',
   access: 'signed_in',
   perMinute: 10,
-  body: z.strictObject({ current: currentPassword, password: newPassword }),
+  body: passwordChange,
   answer: me,
 });
+
+export const renameBody = z.strictObject({ name: line(100) });
 
 export const renameAccount = endpoint({
   method: 'PATCH',
   path: '/api/account',
   summary: 'Change the name that others see',
   access: 'signed_in',
-  body: z.strictObject({ name: line(100) }),
+  body: renameBody,
   answer: me,
 });
+
+export const closeBody = z.strictObject({ password: currentPassword });
 
 export const closeAccount = endpoint({
   method: 'POST',
@@ -133,7 +145,7 @@ export const closeAccount = endpoint({
     'Close the account; refused while an order is open or a seller account would be left without an owner',
   access: 'signed_in',
   perMinute: 10,
-  body: z.strictObject({ password: currentPassword }),
+  body: closeBody,
 });
 
 export const listSessions = endpoint({

@@ -133,6 +133,8 @@ export const getTeam = endpoint({
   answer: team,
 });
 
+export const inviteBody = z.strictObject({ email, duties });
+
 export const inviteMember = endpoint({
   method: 'POST',
   path: '/api/sellers/:id/invites',
@@ -140,7 +142,7 @@ export const inviteMember = endpoint({
   access: 'owner',
   perMinute: 20,
   params: idParams,
-  body: z.strictObject({ email, duties }),
+  body: inviteBody,
   answer: team,
   status: 201,
 });

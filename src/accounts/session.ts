@@ -35,14 +35,31 @@ export function useTakeSession(): (me: Me) => void {
   };
 }
 
+/** An answer about the same person: a new name, a new session. What was read stays true. */
+export function useTakeMe(): (me: Me) => void {
+  const client = useQueryClient();
+  return (me) => {
+    rememberCsrfToken(me.csrfToken);
+    client.setQueryData(meQuery.queryKey, me);
+  };
+}
+
+/** The session is over on the server: asks who is there now, and forgets what was read under it. */
+export function useLeave(): () => Promise<void> {
+  const client = useQueryClient();
+  return async () => {
+    await client.fetchQuery({ ...meQuery, staleTime: 0 });
+    forgetTheRest(client);
+  };
+}
+
 /** Ends the session on the server, then forgets what was read under it. */
 export function useSignOut(onDone: () => void): () => void {
-  const client = useQueryClient();
+  const leave = useLeave();
   const { mutate } = useMutation({
     mutationFn: () => call(signOut),
     onSuccess: async () => {
-      await client.fetchQuery({ ...meQuery, staleTime: 0 });
-      forgetTheRest(client);
+      await leave();
       onDone();
     },
   });
