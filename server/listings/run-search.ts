@@ -28,8 +28,10 @@ export async function runSearch(
   const strayed = place?.order === 'distance' && !from;
   if (query.cursor !== undefined && (!place || strayed || (place.mode !== 'none' && !query.q)))
     return invalid('cursor', 'Start again from the first page');
-  const found = await findListings(deps.pool, query, from, place);
-  const { facets, total } = await countListings(deps.pool, found.ask);
+  // Without words there is nothing to find out first, so page and counts can be read side by side.
+  const plain = query.q ? null : countListings(deps.pool, { query, mode: 'none', from });
+  const [found, counted] = await Promise.all([findListings(deps.pool, query, from, place), plain]);
+  const { facets, total } = counted ?? (await countListings(deps.pool, found.ask));
   return {
     items: found.rows.map((row) => presentCard(row, from)),
     next: found.next,

@@ -1,7 +1,7 @@
 // A unit as search shows it, and the question that search takes; the page's address holds the whole question.
 import { z } from 'zod';
 import { at, cents, id, pageQuery, zip } from '../kernel/fields';
-import { UNIT_KINDS, unitKind } from '../catalogue/kinds';
+import { unitKind } from '../catalogue/kinds';
 import { GRADES } from './condition';
 
 export const unitState = z.enum(['in_vehicle', 'pulled']);
@@ -94,7 +94,6 @@ export const facets = z.object({
   familyId: z.array(facetValue),
 });
 export type Facets = z.infer<typeof facets>;
-export const FACET_KINDS = UNIT_KINDS;
 
 /** Counting stops here: beyond it a total is "1000+" and each facet count "at least". */
 export const COUNT_CAP = 1_000;

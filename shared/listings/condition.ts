@@ -227,31 +227,6 @@ export function gradeOf(kind: UnitKind, given: Answers): GradeResult {
 /** True where the answers say that the unit must not be sold (18 U.S.C. 511: identifying number removed). */
 export const numberRemoved = (given: Answers): boolean => given['number_intact'] === 'no';
 
-const HEAVY: Readonly<Record<UnitKind, string>> = {
-  automatic:
-    'Heavy and off balance. Use a hoist or a transmission jack with its strap; keep the converter in place.',
-  manual: 'Heavy and off balance. Use a hoist or a transmission jack with its strap.',
-  transfer_case: 'Heavy and off balance. Use a hoist or a jack with a strap, or two people on the flat.',
-  axle: 'Heavy, and it rolls. Use a hoist or two jacks; it may turn when lifted at the pinion.',
-};
-
-/** The cautions that belong beside this unit. The service manual, local rules and licensed practice come first. */
-export function hazards(kind: UnitKind, state: 'in_vehicle' | 'pulled', given: Answers): string[] {
-  const list = [HEAVY[kind]];
-  if (state === 'in_vehicle') {
-    list.push(
-      'Never under a vehicle held by a jack alone: rated stands on hard level ground, wheels chocked.',
-    );
-  }
-  if (kind === 'automatic' && given['converter'] !== 'no') {
-    list.push('The converter can slide out of the bell when the unit tips. Strap it.');
-  }
-  if (given['drained'] !== 'yes') {
-    list.push('Fluid may be left inside: drain and plug before it moves, catch it, hand it in as used oil.');
-  }
-  return list;
-}
-
 /** Deduction lines a seller can start from: every fault that touches the grade, with the words of the checklist. */
 export const faultsOf = (kind: UnitKind): readonly Question[] =>
   checklist(kind).filter((one) => one.effect !== 'none' && one.effect !== 'refused');

@@ -7,11 +7,11 @@ import {
   effectOf,
   GRADES,
   gradeOf,
-  hazards,
   numberRemoved,
   type Answer,
   type Answers,
 } from '../../shared/listings/condition';
+import { hazards } from '../../shared/listings/hazards';
 
 const allYes = (kind: UnitKind): Answers =>
   Object.fromEntries(checklist(kind).map((question) => [question.code, 'yes' as const]));
