@@ -32,6 +32,8 @@ const page = (pattern: string, load: LoadPage, needs?: Needs): RouteObject => ({
  * `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),`
  */
 const pages: RouteObject[] = [
+  page(paths.results.pattern, () => import('./pages/results-page').then((m) => m.ResultsPage)),
+  page(paths.listing.pattern, () => import('./pages/unit-page').then((m) => m.UnitPage)),
   page(paths.signIn.pattern, () => import('./pages/sign-in-page').then((m) => m.SignInPage)),
   page(paths.signUp.pattern, () => import('./pages/sign-up-page').then((m) => m.SignUpPage)),
   page(
