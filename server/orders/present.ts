@@ -105,6 +105,7 @@ function presentHead(head: queries.OrderHead, actor: Actor, side: Side, extras: 
     next,
     deadlineAt:
       next.map((step) => step.deadlineAt).find((at) => at !== undefined) ?? iso(striking[0] ?? null),
+    zone: order.zone,
     caseId: extras.caseId,
     createdAt: order.createdAt.toISOString(),
     updatedAt: order.updatedAt.toISOString(),
@@ -205,7 +206,6 @@ export async function presentOrder(tx: Tx, head: queries.OrderHead, actor: Actor
     schedule: order.schedule,
     returnFreight: order.returnFreight,
     clocks: clocks.map((one) => ({ clock: one.clock, at: one.at.toISOString() })),
-    zone: order.zone,
     frozen: order.frozen,
     checkoutUrl: side === 'builder' && order.outbound === 'awaiting_payment' ? order.checkoutUrl : null,
     photos: photos.flatMap(({ photo }) => presentOrderPhoto(photo, order) ?? []),

@@ -72,6 +72,8 @@ export const orderSummary = z.object({
   totalCents: cents,
   next: z.array(nextStep),
   deadlineAt: at.nullable(),
+  /** IANA zone of the seller, in which every deadline of the order is counted. */
+  zone: z.string(),
   caseId: id.nullable(),
   createdAt: at,
   updatedAt: at,
@@ -121,7 +123,6 @@ export const order = orderSummary.extend({
   schedule: z.array(scheduleItem),
   returnFreight: z.enum(['seller', 'builder']),
   clocks: z.array(openClock),
-  zone: z.string(),
   frozen: z.boolean(),
   checkoutUrl: z.string().nullable(),
   photos: z.array(orderPhoto),
