@@ -1,11 +1,12 @@
 // Puts the Express app together from its seams; never listens, so that each test can start its own.
 import { randomUUID } from 'node:crypto';
 import fs from 'node:fs';
+import type { IncomingMessage, ServerResponse } from 'node:http';
 import path from 'node:path';
 import compression from 'compression';
 import express, { type Express, type Request, type Response } from 'express';
 import helmet from 'helmet';
-import { pinoHttp } from 'pino-http';
+import { pinoHttp, type HttpLogger } from 'pino-http';
 import { csrfGuard, sessionLayer } from './http/session';
 import { createSeams } from './accounts/seams';
 import type { Deps } from './deps';
@@ -47,13 +48,13 @@ function securityHeaders(deps: Deps): ReturnType<typeof helmet> {
   });
 }
 
-function requestLog(deps: Deps): ReturnType<typeof pinoHttp> {
+function requestLog(deps: Deps): HttpLogger {
   return pinoHttp({
     logger: deps.log,
     genReqId: () => randomUUID(),
-    autoLogging: { ignore: (req) => !req.url?.startsWith('/api/') },
+    autoLogging: { ignore: (req: IncomingMessage) => !req.url?.startsWith('/api/') },
     redact: { paths: ['req.headers', 'res.headers'], remove: true },
-    customLogLevel: (_req, res, error) => (error || res.statusCode >= 500 ? 'error' : 'debug'),
+    customLogLevel: (_req: IncomingMessage, res: ServerResponse, error?: Error) => (error || res.statusCode >= 500 ? 'error' : 'debug'),
   });
 }
 

@@ -16,7 +16,9 @@ export interface OwnedDeps {
 
 export async function makeDeps(env: Env, options: { clock?: Clock } = {}): Promise<OwnedDeps> {
   const log = pino({ level: env.LOG_LEVEL, base: { name: 'spragyard' } });
-  const database = connect(env.DATABASE_URL, env.DATABASE_POOL, (error) => log.error({ err: error }, 'database'));
+  const database = connect(env.DATABASE_URL, env.DATABASE_POOL, (error) =>
+    log.error({ err: error }, 'database'),
+  );
   const storage = createStorageGateway({
     endpoint: env.S3_ENDPOINT,
     region: env.S3_REGION,

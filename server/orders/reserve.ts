@@ -16,7 +16,7 @@ import type { Tx } from '../db/client';
 import type { Deps } from '../deps';
 import { locateZip } from '../geo/zip';
 import { invalid, isRefusal, notFound, refuse, type Refusal } from '../http/refusal';
-import { listingForOrder, reserveListing, type ListingRow } from '../listings/for-others';
+import { keepShotsForOrder, listingForOrder, reserveListing, type ListingRow } from '../listings/for-others';
 import { actOnLocked } from './act';
 import { openCheckout } from './checkout';
 import { startClocks } from './deadlines';
@@ -136,6 +136,7 @@ async function insertOrder(
     .values(newOrder(taken, seller, input, amounts, actor.userId, now))
     .returning();
   if (!order) throw new Error('the new order was not returned');
+  await keepShotsForOrder(tx, taken.id, order.id);
   await startClocks(deps, tx, order.id, [{ clock: 'reserve_lapse', at: reserveLapsesAt(now) }]);
   await tx.insert(timeline).values({
     orderId: order.id,

@@ -106,9 +106,9 @@ export const orders = pgTable(
       .where(
         sql`outbound in ('awaiting_payment','paid','packed','in_transit','collected','delivered','refused')`,
       ),
-    index('orders_builder').on(t.builderId, t.createdAt.desc(), t.id.desc()),
-    index('orders_seller').on(t.sellerId, t.createdAt.desc(), t.id.desc()),
-    index('orders_newest').on(t.createdAt.desc(), t.id.desc()),
+    index('orders_builder').on(t.builderId, t.createdAt, t.id),
+    index('orders_seller').on(t.sellerId, t.createdAt, t.id),
+    index('orders_newest').on(t.createdAt, t.id),
     index('orders_tag').on(t.tagCode),
     check(
       'orders_amounts',

@@ -13,7 +13,7 @@ export async function trackRecordOf(deps: Deps, sellerId: string): Promise<Track
       depositsSettled: sql<number>`count(*) filter (where ${orders.core} = 'settled')::int`,
       depositsWhole: sql<number>`count(*) filter (where ${orders.core} = 'settled'
         and coalesce(jsonb_array_length(${orders.deductions}), 0) = 0)::int`,
-      cases: sql<number>`count(*) filter (where exists (select 1 from ${cases} c where c.order_id = ${orders.id}))::int`,
+      cases: sql<number>`count(*) filter (where exists (select 1 from ${cases} c where c.order_id = orders.id))::int`,
       daysToShip: sql<
         number | null
       >`avg(extract(epoch from ${orders.shippedAt} - ${orders.paidAt}) / 86400)::float8`,

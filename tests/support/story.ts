@@ -21,7 +21,6 @@ export interface Story {
 }
 
 export async function reserve(
-  server: TestServer,
   builder: Person,
   listing: GivenListing,
   over: Record<string, unknown> = {},
@@ -42,7 +41,7 @@ export async function startStory(
   over: Record<string, unknown> = {},
 ): Promise<Story> {
   const { builder, yard, listing } = people;
-  const made = await reserve(server, builder, listing, over);
+  const made = await reserve(builder, listing, over);
   if (made.status !== 201) throw new Error(`reserve: ${made.status} ${JSON.stringify(made.body)}`);
   const orderId = text(made.body, 'order', 'id');
   const see = (who: Person = builder): Promise<Answer> => who.client.get(`/api/orders/${orderId}`);
