@@ -32,8 +32,17 @@ const page = (pattern: string, load: LoadPage, needs?: Needs): RouteObject => ({
  * `page(paths.order.pattern, () => import('./pages/order-page').then((m) => m.OrderPage), 'signed_in'),`
  */
 const pages: RouteObject[] = [
+  page(paths.home.pattern, () => import('./pages/home-page').then((m) => m.HomePage)),
   page(paths.results.pattern, () => import('./pages/results-page').then((m) => m.ResultsPage)),
   page(paths.listing.pattern, () => import('./pages/unit-page').then((m) => m.UnitPage)),
+  page(paths.codeReader.pattern, () => import('./pages/code-page').then((m) => m.CodePage)),
+  page(paths.families.pattern, () => import('./pages/families-page').then((m) => m.FamiliesPage)),
+  page(paths.family.pattern, () => import('./pages/family-page').then((m) => m.FamilyPage)),
+  page(
+    paths.adminCatalogue.pattern,
+    () => import('./pages/admin-catalogue-page').then((m) => m.AdminCataloguePage),
+    'admin',
+  ),
   page(paths.signIn.pattern, () => import('./pages/sign-in-page').then((m) => m.SignInPage)),
   page(paths.signUp.pattern, () => import('./pages/sign-up-page').then((m) => m.SignUpPage)),
   page(
